@@ -1,0 +1,11 @@
+/** @type {import("next").NextConfig} */
+const config = {
+  typedRoutes: true,
+  poweredByHeader: false,
+  reactStrictMode: true,
+  // Native or file-reading packages stay outside the bundle: they find their own files by path.
+  serverExternalPackages: ["better-sqlite3", "@node-rs/argon2", "pdfkit", "nodemailer", "pino", "knex"],
+  turbopack: { root: import.meta.dirname },
+};
+
+export default config;
