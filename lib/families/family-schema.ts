@@ -1,0 +1,70 @@
+import { z } from "zod";
+import { nameField, phoneField } from "@/lib/people/person-schema";
+import { isDay } from "@/lib/shared/dates";
+import { listOf } from "@/lib/shared/typed";
+import {
+  chairMoves,
+  guideHolds,
+  guideSides,
+  guideTimes,
+  readingFormats,
+  restAfter,
+  supportLevels,
+  transfers,
+  travelTools,
+} from "./access-profile";
+
+const relationship = z.string().trim().max(60, "Shorten this to 60 letters or fewer.");
+
+const contact = z.object({ name: nameField, relationship, phone: phoneField });
+const pickUpPerson = z.object({ name: nameField, relationship });
+
+/** Drops the rows of a form that were left empty, so that an unused second contact asks for nothing. */
+function filledRows(raw: unknown): unknown {
+  if (typeof raw !== "object" || raw === null) return [];
+  return Object.values(raw).filter(
+    (row) => typeof row === "object" && row !== null && Object.values(row).some((value) => typeof value === "string" && value.trim() !== ""),
+  );
+}
+
+export const accessProfileSchema = z
+  .object({
+    travel: listOf(z.enum(travelTools)).pipe(z.array(z.enum(travelTools)).min(1, "Choose at least one way of getting around.")),
+    chair: z.enum(chairMoves).nullish().or(z.literal("").transform(() => null)).transform((value) => value ?? null),
+    transfer: z.enum(transfers).nullish().or(z.literal("").transform(() => null)).transform((value) => value ?? null),
+    restAfter: z.enum(restAfter, "Choose how long before a sit-down is good."),
+    guideWhen: listOf(z.enum(guideTimes)).pipe(z.array(z.enum(guideTimes)).min(1, "Choose when a guide is welcome, or choose not needed.")),
+    guideSide: z.enum(guideSides, "Choose a side, or either."),
+    guideHold: z.enum(guideHolds, "Choose how the guide is held."),
+    support: z.enum(supportLevels, "Choose how much help makes a good day."),
+    reading: z.enum(readingFormats, "Choose how your child reads."),
+    leaderNote: z.string().trim().max(120, "Shorten the note to 120 letters or fewer: it has to fit on a roster.").default(""),
+    photo: z.enum(["yes", "no"], "Choose yes or no."),
+    voice: z.enum(["yes", "no"], "Choose yes or no."),
+    contacts: z.preprocess(filledRows, z.array(contact).min(1, "Enter at least one person we can call.").max(3)),
+    pickUp: z.preprocess(filledRows, z.array(pickUpPerson).min(1, "Enter at least one person who may collect your child.").max(4)),
+  })
+  .superRefine((profile, ctx) => {
+    if (!profile.travel.includes("wheelchair")) return;
+    if (!profile.chair) ctx.addIssue({ code: "custom", path: ["chair"], message: "Choose how the chair moves." });
+    if (!profile.transfer) ctx.addIssue({ code: "custom", path: ["transfer"], message: "Choose how moving to a vehicle seat works." });
+  })
+  .transform((profile) =>
+    profile.travel.includes("wheelchair") ? profile : { ...profile, chair: null, transfer: null },
+  );
+
+export const birthDateField = z
+  .string()
+  .trim()
+  .refine(isDay, "Enter the date of birth as year, month and day, such as 2015-03-28.");
+
+export const addChildSchema = z.object({
+  nameUsed: nameField,
+  legalName: nameField,
+  birthDate: birthDateField,
+  requestId: z.string().min(8).max(60),
+});
+
+export const participantIdSchema = z.object({ participantId: z.string().min(1).max(60) });
+
+export const writeProfileSchema = participantIdSchema.and(accessProfileSchema);

@@ -1,0 +1,70 @@
+import { z } from "zod";
+import { isClockTime, isDay } from "@/lib/shared/dates";
+import { centsFromTyped } from "@/lib/shared/money";
+import { listOf } from "@/lib/shared/typed";
+
+const day = z.string().trim().refine(isDay, "Enter a date as year, month and day, such as 2027-01-09.");
+const clock = z.string().trim().refine(isClockTime, "Enter a time on the 24-hour clock, such as 09:00 or 15:30.");
+const line = (what: string, most: number) =>
+  z.string().trim().min(1, `Enter ${what}.`).max(most, `Shorten ${what} to ${most} letters or fewer.`);
+const whole = (what: string, least: number, most: number) =>
+  z.coerce
+    .number(`Enter ${what} as a number.`)
+    .int(`Enter ${what} as a whole number.`)
+    .min(least, `Enter ${least} or more.`)
+    .max(most, `Enter ${most} or less.`);
+
+export const amountTyped = z
+  .string()
+  .trim()
+  .transform((typed, ctx) => {
+    const cents = centsFromTyped(typed === "" ? "0" : typed);
+    if (cents !== null && cents <= 1_000_000) return cents;
+    ctx.addIssue({ code: "custom", message: "Enter an amount in dollars, such as 12 or 12.50." });
+    return z.NEVER;
+  });
+
+const outingFields = {
+  title: line("a title", 100),
+  theme: line("the sound or theme of the day", 120),
+  summary: line("what the day is like", 2000),
+  siteId: z.string().min(1, "Choose a site."),
+  day,
+  startTime: clock,
+  endTime: clock,
+  seats: whole("the number of seats", 1, 60),
+  youngestAge: whole("the youngest age", 3, 21),
+  oldestAge: whole("the oldest age", 3, 21),
+  suggestedFee: amountTyped,
+  policyId: z.string().min(1, "Choose a policy."),
+  meetingText: line("the meeting-point instructions", 6000),
+  modelIds: listOf(z.string().max(60)),
+};
+
+type Hours = { startTime: string; endTime: string; youngestAge: number; oldestAge: number };
+
+function refineOuting(value: Hours, ctx: z.RefinementCtx) {
+  if (value.endTime <= value.startTime) {
+    ctx.addIssue({ code: "custom", path: ["endTime"], message: "Enter an end that is later than the start." });
+  }
+  if (value.oldestAge < value.youngestAge) {
+    ctx.addIssue({ code: "custom", path: ["oldestAge"], message: "Enter an oldest age that is not below the youngest." });
+  }
+}
+
+export const planOutingSchema = z.object({ ...outingFields, requestId: z.string().min(8).max(60) }).superRefine(refineOuting);
+
+export const changeOutingSchema = z
+  .object({ ...outingFields, slug: z.string(), edition: z.coerce.number().int() })
+  .superRefine(refineOuting);
+
+export const slugSchema = z.object({ slug: z.string().min(1).max(80) });
+
+export const callOffSchema = slugSchema.extend({
+  because: line("the reason, in a sentence families will read", 500),
+});
+
+export const rangeSchema = z
+  .object({ from: z.iso.datetime({ offset: true }).or(day), to: z.iso.datetime({ offset: true }).or(day) })
+  .refine(({ from, to }) => Date.parse(from) < Date.parse(to), "The start of the range must be before its end.")
+  .refine(({ from, to }) => Date.parse(to) - Date.parse(from) <= 400 * 86_400_000, "Ask for 400 days or fewer at a time.");

@@ -1,0 +1,36 @@
+import ical, { ICalEventStatus } from "ical-generator";
+import { publicAddress } from "@/lib/shared/addresses";
+import { ok } from "@/lib/shared/outcome";
+import { defineQuery } from "@/lib/shared/use-case";
+import { isPublic, type Outing } from "./outing";
+import { slugSchema } from "./outing-schema";
+import { findOuting } from "./outing-store";
+
+/** One outing as an RFC 5545 calendar file. */
+export const showOutingCalendar = defineQuery({
+  input: slugSchema,
+  load: (conn, _actor, { slug }, now) => findOuting(conn, { slug }, now),
+  allow: (_actor, outing) => isPublic(outing),
+  run: ({ found: outing, now }) => ok({ slug: outing.slug, calendar: calendarOf(outing, now) }),
+});
+
+/**
+ * The calendar file of an outing. Times are UTC instants, so every calendar shows the right moment
+ * without a time-zone table; the edition is the SEQUENCE, so that a later file replaces an earlier one.
+ */
+export function calendarOf(outing: Outing, now: string): string {
+  const calendar = ical({ prodId: { company: "Dunlin", product: "Outings", language: "EN" } });
+  calendar.createEvent({
+    id: `${outing.id}@dunlin`,
+    sequence: outing.edition,
+    stamp: new Date(now),
+    start: new Date(outing.startsAt),
+    end: new Date(outing.endsAt),
+    summary: outing.title,
+    location: outing.site.name,
+    description: outing.meetingText,
+    url: publicAddress(`/outings/${outing.slug}`),
+    status: outing.state === "called off" ? ICalEventStatus.CANCELLED : ICalEventStatus.CONFIRMED,
+  });
+  return calendar.toString();
+}

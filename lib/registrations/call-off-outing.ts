@@ -1,0 +1,42 @@
+import { listAnswersOf } from "@/lib/helpers/helper-store";
+import { queueMessage } from "@/lib/messages/message-store";
+import { publicOutingFacts } from "@/lib/outings/outing-facts";
+import type { Outing } from "@/lib/outings/outing";
+import { mayPlanOutings } from "@/lib/outings/outing-policy";
+import { callOffSchema } from "@/lib/outings/outing-schema";
+import { findOuting, setOutingState } from "@/lib/outings/outing-store";
+import { findPerson } from "@/lib/people/person-store";
+import type { Connection } from "@/db/connection";
+import { conflict, ok } from "@/lib/shared/outcome";
+import { defineCommand } from "@/lib/shared/use-case";
+import { listRegistrationsOf } from "./registration-store";
+
+/** Calls the day off and tells every family and helper, each in a mail of their own. */
+export const callOffOuting = defineCommand({
+  input: callOffSchema,
+  load: (conn, _actor, { slug }, now) => findOuting(conn, { slug }, now),
+  allow: (actor) => mayPlanOutings(actor),
+  run: ({ conn, now, found: outing, input }) => {
+    if (outing.state === "called off") return ok({ title: outing.title, told: 0 });
+    if (outing.endsAt <= now) return conflict("over", "This outing is over and cannot be called off.");
+    const wasPublic = outing.state !== "draft";
+    setOutingState(conn, now, outing.id, "called off", input.because);
+    const addressees = wasPublic ? addresseesOf(conn, now, outing) : [];
+    for (const person of addressees) {
+      queueMessage(conn, now, {
+        kind: "called-off",
+        facts: { name: person.name, outing: publicOutingFacts(outing), because: input.because },
+        toAddress: person.email,
+        toPersonId: person.id,
+        outingId: outing.id,
+      });
+    }
+    return ok({ title: outing.title, told: addressees.length });
+  },
+});
+
+function addresseesOf(conn: Connection, now: string, outing: Outing) {
+  const families = listRegistrationsOf(conn, outing.id, ["confirmed", "held", "waiting"], now).map((one) => one.registeredBy);
+  const helpers = listAnswersOf(conn, outing.id).filter((one) => one.state !== "no").map((one) => one.personId);
+  return [...new Set([...families, ...helpers])].flatMap((id) => findPerson(conn, id) ?? []);
+}

@@ -1,0 +1,74 @@
+import { knex, type Connection } from "@/db/connection";
+
+/**
+ * Seats are rows: each has one holder or none, so selling one twice is not a mistake somebody could make.
+ * Every function here runs inside its caller's IMMEDIATE transaction.
+ */
+
+/** Gives the lowest free seat to a registration. False: none is free. */
+function takeSeat(conn: Connection, outingId: string, registrationId: string): boolean {
+  const lowest = knex("seats").where({ outing_id: outingId }).whereNull("registration_id").min("number");
+  const { changes } = conn.run(
+    knex("seats").where({ outing_id: outingId }).whereNull("registration_id").where("number", "=", lowest).update({ registration_id: registrationId }),
+  );
+  return changes === 1;
+}
+
+export function holdSeat(conn: Connection, now: string, outingId: string, registrationId: string, until: string): boolean {
+  if (!takeSeat(conn, outingId, registrationId)) return false;
+  conn.run(
+    knex("registrations").where({ id: registrationId }).update({ state: "held", hold_ends_at: until, waiting_since: null, updated_at: now }),
+  );
+  return true;
+}
+
+export function extendHold(conn: Connection, now: string, registrationId: string, until: string): void {
+  conn.run(
+    knex("registrations")
+      .where({ id: registrationId, state: "held" })
+      .where("hold_ends_at", "<", until)
+      .update({ hold_ends_at: until, updated_at: now }),
+  );
+}
+
+export function joinQueue(conn: Connection, now: string, registrationId: string): void {
+  conn.run(
+    knex("registrations").where({ id: registrationId }).update({ state: "waiting", waiting_since: now, hold_ends_at: null, updated_at: now }),
+  );
+}
+
+export function confirmSeat(conn: Connection, now: string, registrationId: string): void {
+  conn.run(
+    knex("registrations").where({ id: registrationId, state: "held" }).update({ state: "confirmed", hold_ends_at: null, confirmed_at: now, updated_at: now }),
+  );
+}
+
+export function giveUpSeat(conn: Connection, now: string, registrationId: string, state: "withdrawn" | "turned away" = "withdrawn"): void {
+  conn.run(knex("seats").where({ registration_id: registrationId }).update({ registration_id: null }));
+  conn.run(knex("pairings").where({ registration_id: registrationId }).del());
+  conn.run(
+    knex("registrations").where({ id: registrationId }).update({ state, hold_ends_at: null, waiting_since: null, updated_at: now }),
+  );
+}
+
+/** Holds of this outing whose time is over. */
+export function listLapsedHolds(conn: Connection, outingId: string, now: string): string[] {
+  return conn
+    .all(knex("registrations").where({ outing_id: outingId, state: "held" }).where("hold_ends_at", "<=", now).select("id"))
+    .map((row) => row.id);
+}
+
+/** Who has waited longest, or null. */
+export function firstInQueue(conn: Connection, outingId: string): string | null {
+  return (
+    conn.first(
+      knex("registrations").where({ outing_id: outingId, state: "waiting" }).orderBy(["waiting_since", "id"]).select("id"),
+    )?.id ?? null
+  );
+}
+
+export function listOutingsWithLapsedHolds(conn: Connection, now: string): string[] {
+  return conn
+    .all(knex("registrations").where({ state: "held" }).where("hold_ends_at", "<=", now).distinct("outing_id"))
+    .map((row) => row.outing_id);
+}

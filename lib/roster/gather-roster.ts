@@ -1,0 +1,77 @@
+import type { Connection } from "@/db/connection";
+import { gatherCover, type Coming } from "@/lib/cover-board/gather-cover";
+import type { CoverAdult } from "@/lib/cover/cover";
+import { guideNeedOf } from "@/lib/families/access-profile";
+import type { Outing } from "@/lib/outings/outing";
+import { dayInWords, hoursInWords, momentInWords } from "@/lib/shared/dates";
+import { env } from "@/lib/shared/env";
+import type { RosterAdult, RosterFacts, RosterPerson, TravelCode } from "./roster-facts";
+
+const countPoints = ["Arrive", "Leave", "Midway", "Back"];
+
+/** The roster of an outing as it stands now: the same facts for every form. The version is set by who prints it. */
+export function gatherRoster(conn: Connection, outing: Outing, now: string): RosterFacts {
+  const { input, coming } = gatherCover(conn, outing, now);
+  const zone = outing.site.zone;
+  return {
+    programme: env().PROGRAMME_NAME,
+    outingTitle: outing.title,
+    siteName: outing.site.name,
+    dateInWords: dayInWords(outing.startsAt, zone),
+    timesInWords: hoursInWords(outing.startsAt, outing.endsAt, zone),
+    meetingPoint: outing.site.meetingPoint,
+    version: 0,
+    printedAtInWords: momentInWords(now, zone),
+    printedAt: now,
+    basePhone: env().PROGRAMME_PHONE,
+    people: coming.map((one) => personFrom(one, input.pairings.find((pair) => pair.personId === one.registration.id)?.adultId ?? null)),
+    adults: input.adults.filter((adult) => adult.answer === "yes").map(adultFrom),
+    countPoints,
+  };
+}
+
+function personFrom({ registration, profile }: Coming, adultId: string | null): RosterPerson {
+  if (registration.seatNumber === null) throw new Error(`registration ${registration.id} is confirmed without a seat`);
+  const travel: TravelCode[] = [];
+  const guide = guideNeedOf(profile);
+  if (guide !== "not-needed") travel.push("guide");
+  if (profile.travel.includes("long cane")) travel.push("cane");
+  if (profile.travel.includes("dog guide")) travel.push("dog");
+  if (profile.chair !== null) travel.push("wheels");
+  const notes: string[] = [];
+  if (guide !== "not-needed") notes.push(guideNote(guide, profile));
+  if (profile.chair === "pushed") notes.push("push the chair");
+  if (profile.restAfter !== "not sure" && profile.restAfter !== "60") notes.push(`sit down every ${profile.restAfter} minutes`);
+  if (profile.leaderNote !== "") notes.push(profile.leaderNote);
+  return {
+    number: registration.seatNumber,
+    nameUsed: registration.participant.nameUsed,
+    adultId,
+    travel,
+    supportLevel: profile.support,
+    actionNotes: notes,
+    cardNumber: null,
+    photo: profile.photo === "yes" ? "ok" : "no",
+    voice: profile.voice === "yes" ? "ok" : "no",
+    checkIdList: true,
+  };
+}
+
+/** The side is the guide's arm, as the family was asked; the hold is theirs too. */
+function guideNote(guide: "throughout" | "at-times", profile: Coming["profile"]): string {
+  if (profile.guideHold === "spoken directions only") return "guide by spoken directions";
+  const arm = profile.guideSide === "either" ? "either arm" : `guide's ${profile.guideSide} arm`;
+  const hold = profile.guideHold === "hand" ? "by the hand" : profile.guideHold;
+  const when = guide === "throughout" ? "guide all the time" : `guide: ${profile.guideWhen.filter((one) => one !== "not needed" && one !== "not sure").join(", ") || "ask"}`;
+  return `${when}, ${arm}, ${hold}`;
+}
+
+function adultFrom(adult: CoverAdult): RosterAdult {
+  const can: string[] = [];
+  const { guideSides, firstAid, pushChair } = adult.capabilities;
+  if (guideSides.length === 2) can.push("guides either side");
+  else if (guideSides[0]) can.push(`guides, ${guideSides[0]} arm`);
+  if (pushChair) can.push("pushes a chair");
+  if (firstAid) can.push("first aid");
+  return { id: adult.id, name: adult.name, role: adult.role, can };
+}

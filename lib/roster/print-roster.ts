@@ -1,0 +1,58 @@
+import { z } from "zod";
+import { listAnswersOf } from "@/lib/helpers/helper-store";
+import { findOuting } from "@/lib/outings/outing-store";
+import { maySeeRoster } from "@/lib/registrations/registration-policy";
+import { hasRole, isSignedIn, isStaff, type Actor } from "@/lib/shared/actor";
+import type { Connection } from "@/db/connection";
+import { conflict, forbidden, ok } from "@/lib/shared/outcome";
+import { defineCommand } from "@/lib/shared/use-case";
+import { gatherRoster } from "./gather-roster";
+import { checkNeverOnPaper } from "./never-on-paper";
+import { largeSizePt, largestSizePt, paperForms, standardSizePt } from "./paper";
+import { insertPaper, noteReading, rosterHash, versionOf } from "./paper-store";
+import { rosterSheet } from "./roster-sheet";
+
+const printRosterSchema = z
+  .object({
+    slug: z.string().min(1).max(80),
+    form: z.enum(paperForms, "Choose standard or large print."),
+    textSizePt: z.coerce.number("Enter a size in points.").int("Enter a whole number of points.").optional(),
+  })
+  .transform(({ textSizePt, ...rest }) => ({
+    ...rest,
+    textSizePt: rest.form === "standard" ? standardSizePt : Math.min(largestSizePt, Math.max(largeSizePt, textSizePt ?? largeSizePt)),
+  }));
+
+/** Where a roster is asked for: staff, or a leader of this day until three days after it. */
+export function findRosterOuting(conn: Connection, actor: Actor, slug: string, now: string) {
+  const outing = findOuting(conn, { slug }, now);
+  if (!outing) return null;
+  const leaderIds = listAnswersOf(conn, outing.id).filter((one) => one.task === "leader" && one.state === "yes").map((one) => one.personId);
+  const inScope = isStaff(actor) || (hasRole(actor, "leader") && leaderIds.includes(actor.personId));
+  return inScope ? { outing, access: { leaderIds, endsAt: outing.endsAt, now } } : null;
+}
+
+/**
+ * Makes the roster as a paper with a version. Nothing changed since the last print: the same version again.
+ * Refuses, naming the place, when something that must never be on paper has got into the facts.
+ */
+export const printRoster = defineCommand({
+  input: printRosterSchema,
+  load: (conn, actor, input, now) => findRosterOuting(conn, actor, input.slug, now),
+  allow: (actor, { access }) => maySeeRoster(actor, access, access.now),
+  run: ({ conn, now, actor, input, found: { outing } }) => {
+    if (!isSignedIn(actor)) return forbidden();
+    const gathered = gatherRoster(conn, outing, now);
+    const facts = { ...gathered, version: versionOf(conn, outing.id, rosterHash(gathered)) };
+    const [problem] = checkNeverOnPaper(rosterSheet(facts, "table"), knownTexts(facts));
+    if (problem) return conflict("never-on-paper", problem.sentence);
+    const paperId = insertPaper(conn, { outingId: outing.id, form: input.form, textSizePt: input.textSizePt, facts, printedBy: actor.personId });
+    noteReading(conn, now, { personId: actor.personId, what: "printed the roster", aboutId: outing.id });
+    return ok({ paperId, slug: outing.slug, version: facts.version });
+  },
+});
+
+/** The programme's own words, which may look like what must never be on paper: its phone, the place, the title. */
+function knownTexts(facts: ReturnType<typeof gatherRoster>): string[] {
+  return [facts.basePhone, facts.meetingPoint, facts.outingTitle, facts.siteName, facts.programme, facts.dateInWords, facts.printedAtInWords];
+}

@@ -1,0 +1,12 @@
+import { z } from "zod";
+import { ok } from "@/lib/shared/outcome";
+import { defineQuery } from "@/lib/shared/use-case";
+import { findWaiverInForce } from "./waiver-store";
+
+/** The waiver's text is public: anybody may read it before they have to decide. */
+export const showWaiver = defineQuery({
+  input: z.object({}),
+  load: (conn, _actor, _input, now) => findWaiverInForce(conn, now.slice(0, 10)),
+  allow: () => true,
+  run: ({ found: text }) => ok(text),
+});
