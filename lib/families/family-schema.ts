@@ -19,12 +19,21 @@ const relationship = z.string().trim().max(60, "Shorten this to 60 letters or fe
 const contact = z.object({ name: nameField, relationship, phone: phoneField });
 const pickUpPerson = z.object({ name: nameField, relationship });
 
-/** Drops the rows of a form that were left empty, so that an unused second contact asks for nothing. */
-function filledRows(raw: unknown): unknown {
+/** A row that was left empty is null, not an error; its place in the form stays, so that errors find their row. */
+function rowsOf(raw: unknown): unknown {
   if (typeof raw !== "object" || raw === null) return [];
-  return Object.values(raw).filter(
-    (row) => typeof row === "object" && row !== null && Object.values(row).some((value) => typeof value === "string" && value.trim() !== ""),
-  );
+  return Object.values(raw).map((row: unknown) => (isBlank(row) ? null : row));
+}
+
+function isBlank(row: unknown): boolean {
+  return typeof row !== "object" || row === null || Object.values(row).every((value) => typeof value !== "string" || value.trim() === "");
+}
+
+function rows<Row extends z.ZodType>(row: Row, most: number, needed: string) {
+  return z
+    .preprocess(rowsOf, z.array(row.nullable()).max(most))
+    .transform((all) => all.filter((one) => one !== null))
+    .refine((filled) => filled.length > 0, needed);
 }
 
 export const accessProfileSchema = z
@@ -41,8 +50,8 @@ export const accessProfileSchema = z
     leaderNote: z.string().trim().max(120, "Shorten the note to 120 letters or fewer: it has to fit on a roster.").default(""),
     photo: z.enum(["yes", "no"], "Choose yes or no."),
     voice: z.enum(["yes", "no"], "Choose yes or no."),
-    contacts: z.preprocess(filledRows, z.array(contact).min(1, "Enter at least one person we can call.").max(3)),
-    pickUp: z.preprocess(filledRows, z.array(pickUpPerson).min(1, "Enter at least one person who may collect your child.").max(4)),
+    contacts: rows(contact, 3, "Enter at least one person we can call."),
+    pickUp: rows(pickUpPerson, 4, "Enter at least one person who may collect your child."),
   })
   .superRefine((profile, ctx) => {
     if (!profile.travel.includes("wheelchair")) return;

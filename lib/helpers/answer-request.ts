@@ -1,6 +1,7 @@
 import type { Connection } from "@/db/connection";
 import { findOuting } from "@/lib/outings/outing-store";
 import { findMailLink } from "@/lib/people/mail-link-store";
+import { personIdOf } from "@/lib/shared/actor";
 import { conflict, ok, type Outcome } from "@/lib/shared/outcome";
 import { defineCommand } from "@/lib/shared/use-case";
 import type { Answer, HelperAnswer } from "./helper";
@@ -11,7 +12,10 @@ import { findAnswer, setAnswer, unpairHelper } from "./helper-store";
 /** Yes, maybe or no from the helper's own page. */
 export const answerRequest = defineCommand({
   input: answerSchema,
-  load: (conn, _actor, input) => findAnswer(conn, input.answerId),
+  load: (conn, actor, input) => {
+    const asked = findAnswer(conn, input.answerId);
+    return asked?.personId === personIdOf(actor) ? asked : null;
+  },
   allow: (actor, asked) => mayAnswer(actor, asked),
   run: ({ conn, now, found: asked, input }) => answer(conn, now, asked, input.answer),
 });

@@ -6,19 +6,19 @@ import { isPublic, type Outing } from "./outing";
 import { slugSchema } from "./outing-schema";
 import { findOuting } from "./outing-store";
 
-/** One outing as an RFC 5545 calendar file. */
+/** One outing as an RFC 5545 calendar file, for everybody: so without where to meet, which is told to those who come. */
 export const showOutingCalendar = defineQuery({
   input: slugSchema,
   load: (conn, _actor, { slug }, now) => findOuting(conn, { slug }, now),
   allow: (_actor, outing) => isPublic(outing),
-  run: ({ found: outing, now }) => ok({ slug: outing.slug, calendar: calendarOf(outing, now) }),
+  run: ({ found: outing, now }) => ok({ slug: outing.slug, calendar: calendarOf(outing, now, outing.summary) }),
 });
 
 /**
  * The calendar file of an outing. Times are UTC instants, so every calendar shows the right moment
  * without a time-zone table; the edition is the SEQUENCE, so that a later file replaces an earlier one.
  */
-export function calendarOf(outing: Outing, now: string): string {
+export function calendarOf(outing: Outing, now: string, description = outing.meetingText): string {
   const calendar = ical({ prodId: { company: "Dunlin", product: "Outings", language: "EN" } });
   calendar.createEvent({
     id: `${outing.id}@dunlin`,
@@ -28,7 +28,7 @@ export function calendarOf(outing: Outing, now: string): string {
     end: new Date(outing.endsAt),
     summary: outing.title,
     location: outing.site.name,
-    description: outing.meetingText,
+    description,
     url: publicAddress(`/outings/${outing.slug}`),
     status: outing.state === "called off" ? ICalEventStatus.CANCELLED : ICalEventStatus.CONFIRMED,
   });

@@ -37,7 +37,8 @@ export const chooseFee = defineCommand({
     if (registration.state !== "held") {
       return conflict("not-held", "No seat is held for this registration now. Go back to the outing's page to register again.");
     }
-    const { suggestedFeeCents, currency, title } = registration.outing;
+    const { suggestedFeeCents, currency, title, state } = registration.outing;
+    if (state === "called off") return conflict("called-off", "This outing is called off, so there is nothing to pay.");
     const amountCents =
       input.choice === "no fee" ? 0 : input.choice === "suggested" ? suggestedFeeCents : (centsFromTyped(input.otherAmount) ?? 0);
     const pending = registration.payment;

@@ -83,13 +83,13 @@ export function listMoneyToReturn(conn: Connection): MoneyToReturn[] {
         either.where("p.state", "abandoned").orWhereIn("r.state", ["withdrawn", "turned away"]);
       })
       .orderBy("p.settled_at")
-      .select("p.id", "c.name_used", "p.amount_cents", "p.currency", "p.state"),
+      .select("p.id", "c.name_used", "p.amount_cents", "p.currency", "r.state"),
   );
   return rows.map((row) => ({
     paymentId: row.id,
     nameUsed: row.name_used,
     amountCents: row.amount_cents,
     currency: row.currency,
-    why: row.state === "abandoned" ? "paid twice" : "withdrawn",
+    why: row.state === "withdrawn" || row.state === "turned away" ? "withdrawn" : "paid twice",
   }));
 }

@@ -12,7 +12,7 @@ import { defineCommand } from "@/lib/shared/use-case";
 import { checkoutPaidSchema } from "./payment-schema";
 import { findPayment, hasSettledPayment, noteEvent, noteExtraPayment, settlePayment } from "./payment-store";
 
-export type EventAnswer = "settled" | "seen before" | "not ours" | "other amount" | "paid twice";
+export type EventAnswer = "settled" | "seen before" | "not ours" | "other amount" | "paid twice" | "withdrawn";
 
 /** A checkout was paid: settles the payment once, however often and whenever this is told. */
 export const takeCheckoutEvent = defineCommand({
@@ -31,6 +31,11 @@ export const takeCheckoutEvent = defineCommand({
       noteExtraPayment(conn, now, payment.id, input.paymentIntentId);
       return ok<EventAnswer>("paid twice");
     }
+    if (payment.state === "abandoned" && findRegistration(conn, payment.registration_id, now)?.state === "withdrawn") {
+      // The family gave the seat back before the message came: the money is returned, the child not brought back.
+      noteExtraPayment(conn, now, payment.id, input.paymentIntentId);
+      return ok<EventAnswer>("withdrawn");
+    }
     settlePayment(conn, now, payment.id, input.paymentIntentId);
     seatForPayment(conn, now, payment.registration_id);
     return ok<EventAnswer>("settled");
@@ -43,7 +48,7 @@ function seatForPayment(conn: Connection, now: string, registrationId: string): 
   const registration = findRegistration(conn, registrationId, now);
   if (registration?.state !== "withdrawn") return;
   const outing = findOuting(conn, { id: registration.outing.id }, now);
-  if (!outing) return;
+  if (!outing || outing.state === "called off" || outing.endsAt <= now) return;
   settleSeats(conn, now, outing);
   if (holdSeat(conn, now, outing.id, registrationId, minutesLater(now, holdMinutes))) {
     confirmIfComplete(conn, now, registrationId);

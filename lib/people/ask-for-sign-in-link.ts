@@ -9,12 +9,12 @@ import { askForLinkSchema } from "./person-schema";
 /** Mails a link to whoever has this address. At most five an hour; the answer never tells whether anybody has. */
 export const askForSignInLink = defineCommand({
   input: askForLinkSchema,
-  load: (conn, _actor, input) => ({ person: findPersonByEmail(conn, input.email) }),
+  load: (conn, _actor, input) => ({ person: findPersonByEmail(conn, input.linkEmail) }),
   allow: () => true,
   run: ({ conn, now, input, found: { person } }) => {
     if (person && countLinksMade(conn, person.id, "sign-in", minutesLater(now, -60)) < 5) {
       mailSignInLink(conn, now, person, "sign-in-link");
     }
-    return ok({ email: input.email });
+    return ok({ email: input.linkEmail });
   },
 });

@@ -38,7 +38,7 @@ export const signInSchema = z.object({
   password: z.string().min(1, "Enter your password, or ask for a link by e-mail instead.").max(200, "That is longer than any password here."),
 });
 
-export const askForLinkSchema = z.object({ email: emailField });
+export const askForLinkSchema = z.object({ linkEmail: emailField });
 
 export const secretSchema = z.object({ secret: z.string().min(20).max(100) });
 

@@ -3,13 +3,13 @@ import { findOuting } from "@/lib/outings/outing-store";
 import { isSystem } from "@/lib/shared/actor";
 import { ok } from "@/lib/shared/outcome";
 import { defineCommand } from "@/lib/shared/use-case";
-import { listOutingsWithLapsedHolds } from "./seat-store";
+import { listOutingsToSettle } from "./seat-store";
 import { settleSeats } from "./settle-seats";
 
-/** The clock's round: holds that ran out are given up and offered on, even if nobody opens a page. */
+/** The clock's round: holds that ran out are given up and free seats are offered on, even if nobody opens a page. */
 export const releaseLapsedHolds = defineCommand({
   input: z.object({}),
-  load: (conn, _actor, _input, now) => ({ outingIds: listOutingsWithLapsedHolds(conn, now) }),
+  load: (conn, _actor, _input, now) => ({ outingIds: listOutingsToSettle(conn, now) }),
   allow: (actor) => isSystem(actor, "clock"),
   run: ({ conn, now, found: { outingIds } }) => {
     for (const id of outingIds) {

@@ -31,9 +31,15 @@ export function extendHold(conn: Connection, now: string, registrationId: string
   );
 }
 
+/** Behind everybody who waits already: of those who come in the same millisecond, nobody slips in front later. */
 export function joinQueue(conn: Connection, now: string, registrationId: string): void {
+  const outingId = knex("registrations").where({ id: registrationId }).select("outing_id");
+  const last = conn.first(
+    knex("registrations").where({ state: "waiting" }).where("outing_id", "=", outingId).max({ since: "waiting_since" }),
+  )?.since as string | null | undefined;
+  const since = last != null && last >= now ? new Date(Date.parse(last) + 1).toISOString() : now;
   conn.run(
-    knex("registrations").where({ id: registrationId }).update({ state: "waiting", waiting_since: now, hold_ends_at: null, updated_at: now }),
+    knex("registrations").where({ id: registrationId }).update({ state: "waiting", waiting_since: since, hold_ends_at: null, updated_at: now }),
   );
 }
 
@@ -67,8 +73,10 @@ export function firstInQueue(conn: Connection, outingId: string): string | null 
   );
 }
 
-export function listOutingsWithLapsedHolds(conn: Connection, now: string): string[] {
-  return conn
-    .all(knex("registrations").where({ state: "held" }).where("hold_ends_at", "<=", now).distinct("outing_id"))
-    .map((row) => row.outing_id);
+/** Outings with something to settle: a hold whose time is over, or a seat that became free while somebody waits. */
+export function listOutingsToSettle(conn: Connection, now: string): string[] {
+  const lapsed = conn.all(knex("registrations").where({ state: "held" }).where("hold_ends_at", "<=", now).distinct("outing_id"));
+  const waitedFor = knex("registrations").where({ state: "waiting" }).select("outing_id");
+  const free = conn.all(knex("seats").whereNull("registration_id").whereIn("outing_id", waitedFor).distinct("outing_id"));
+  return [...new Set([...lapsed, ...free].map((row) => row.outing_id))];
 }

@@ -32,7 +32,7 @@ function offerFreeSeats(conn: Connection, now: string, outing: Outing): void {
 /** Confirms a held seat once the needs are known, the waiver is signed and the fee is settled. */
 export function confirmIfComplete(conn: Connection, now: string, registrationId: string): boolean {
   const registration = findRegistration(conn, registrationId, now);
-  if (!registration || registration.state !== "held") return false;
+  if (!registration || registration.state !== "held" || registration.outing.state === "called off") return false;
   const left = stepsLeft({
     hasNeeds: registration.hasNeeds,
     signed: registration.signature !== null,

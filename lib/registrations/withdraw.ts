@@ -1,3 +1,4 @@
+import { abandonPayment } from "@/lib/payments/payment-store";
 import { personIdOf } from "@/lib/shared/actor";
 import { conflict, ok } from "@/lib/shared/outcome";
 import { defineCommand } from "@/lib/shared/use-case";
@@ -19,6 +20,7 @@ export const withdraw = defineCommand({
     if (!isLive(registration.state)) return conflict("not-live", "This registration has ended already.");
     if (outing.endsAt <= now) return conflict("over", "This outing is over. Call us if something has to be put right.");
     giveUpSeat(conn, now, registration.id);
+    if (registration.payment?.state === "pending") abandonPayment(conn, registration.payment.id);
     settleSeats(conn, now, outing);
     const paid = registration.payment?.state === "settled" && registration.payment.amountCents > 0;
     return ok({ nameUsed: participant.nameUsed, title: outing.title, paid });

@@ -94,19 +94,37 @@ export const neverOnPaper: readonly NeverOnPaper[] = [
     id: "behaviour",
     what: "a behaviour history",
     instead: "Write what helps.",
-    patterns: [/\b(?:aggressive|aggression|violent|violence|tantrums?|runs away|eloped?|elopement|self-harm\w*|expelled|suspended)\b/iu],
+    patterns: [
+      /\b(?:aggressive|aggression|violent|violence|tantrums?|runs away|self-harm\w*|expelled|suspended)\b/iu,
+      /\b(?:eloped?|elopement)\b/iu,
+    ],
   },
-  { id: "photo-reason", what: "the reason for no photo", instead: "Print NP or NV alone.",
-    patterns: [/\bno (?:photos?|voice(?: recording)?)\b\s*(?:because|due to|since|as the|\()/iu] },
-  { id: "guardian-remark", what: "a guardian's private remark", instead: "Ask the coordinator to turn it into an action.",
-    patterns: [/\b(?:in confidence|confidential|private(?:ly)?|please don['’]t tell|mother says|father says|mom says|dad says)\b/iu] },
+  {
+    id: "photo-reason",
+    what: "the reason for no photo",
+    instead: "Print NP or NV alone.",
+    patterns: [/\bno (?:photos?|voice(?: recording)?)\b\s*(?:because|due to|since|as the|\()/iu],
+  },
+  {
+    id: "guardian-remark",
+    what: "a guardian's private remark",
+    instead: "Ask the coordinator to turn it into an action.",
+    patterns: [
+      /\b(?:in confidence|confidential|private(?:ly)?|please don['’]t tell|(?:mother|father|mom|dad) says)\b/iu,
+    ],
+  },
   {
     id: "phone",
     what: "another phone number than the base's",
     instead: "Call the base.",
     patterns: [/(?<![\w-])\+?\(?\d(?:[\s().\u00A0-]?\d){6,14}(?!\w)/u],
   },
-  { id: "e-mail", what: "an e-mail address", instead: "Call the base.", patterns: [/[^\s@]+@[^\s@]+\.\p{L}{2,}/u] },
+  {
+    id: "e-mail",
+    what: "an e-mail address",
+    instead: "Call the base.",
+    patterns: [/[^\s@]+@[^\s@]+\.\p{L}{2,}/u],
+  },
 ];
 
 export type NeverOnPaperFinding = {
@@ -134,8 +152,9 @@ function findingsOf(rule: NeverOnPaper, text: string, where: string): NeverOnPap
   for (const pattern of rule.patterns) {
     const found = pattern.exec(text)?.[0].trim();
     if (found === undefined) continue;
-    const sentence = `“${found}” in ${where} looks like ${rule.what}, which must never be on a roster. ${rule.instead} ` +
-      "If it is something else, word it differently.";
+    const sentence =
+      `“${found}” in ${where} looks like ${rule.what}, which must never be on a roster. ` +
+      `${rule.instead} If it is something else, word it differently.`;
     return [{ id: rule.id, found, where, sentence }];
   }
   return [];

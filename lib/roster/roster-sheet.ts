@@ -1,4 +1,11 @@
-import { counted, joinWords, sortPeople, totalsInWords, travelLetters, travelWords } from "@/lib/roster/roster-facts";
+import {
+  counted,
+  joinWords,
+  sortPeople,
+  totalsInWords,
+  travelLetters,
+  travelWords,
+} from "@/lib/roster/roster-facts";
 import type { RosterAdult, RosterFacts, RosterPerson } from "@/lib/roster/roster-facts";
 import { heading, list, note, paragraph, strongParagraph } from "@/lib/sheets/sheet";
 import type { Block, Column, Entry, EntryLine, ListItem, Sheet, Table } from "@/lib/sheets/sheet";
@@ -37,7 +44,8 @@ export function rosterSheet(facts: RosterFacts, form: RosterForm): Sheet {
 function runningFoot(facts: RosterFacts): string {
   const people = counted(facts.people.length, "person", "people");
   const adults = counted(facts.adults.length, "adult", "adults");
-  return `${people}, ${adults}. Base ${facts.basePhone}. Version ${facts.version}, printed ${facts.printedAtInWords}`;
+  const printed = `Version ${facts.version}, printed ${facts.printedAtInWords}`;
+  return `${people}, ${adults}. Base ${facts.basePhone}. ${printed}`;
 }
 
 function dayFacts(facts: RosterFacts): Block {
@@ -62,7 +70,12 @@ function peopleBlocks(facts: RosterFacts, form: RosterForm): Block[] {
   return [...first, heading(2, "The group"), ...peopleIn(withAdult, caption, facts, form)];
 }
 
-function peopleIn(people: readonly RosterPerson[], caption: string, facts: RosterFacts, form: RosterForm): Block[] {
+function peopleIn(
+  people: readonly RosterPerson[],
+  caption: string,
+  facts: RosterFacts,
+  form: RosterForm,
+): Block[] {
   if (form === "blocks") return [paragraph(caption), ...people.map((person) => personEntry(person, facts))];
   const columns: Column[] = [
     { header: "No.", kind: "number" },
@@ -105,7 +118,8 @@ function personEntry(person: RosterPerson, facts: RosterFacts): Entry {
     { label: "Travel", text: travelInWords(person) },
     { label: "Do", text: notes.join("; ") || "nothing special" },
   ];
-  return { kind: "entry", number: String(person.number), name: spokenName(person), lines, ticks: facts.countPoints };
+  const number = String(person.number);
+  return { kind: "entry", number, name: spokenName(person), lines, ticks: facts.countPoints };
 }
 
 function spokenName(person: RosterPerson): string {
@@ -131,7 +145,11 @@ const cardWords = (person: RosterPerson) => (person.cardNumber === null ? [] : [
 const closeWords = (person: RosterPerson) => (person.supportLevel === "close" ? ["stay close"] : []);
 
 function codes(person: RosterPerson): string[] {
-  const flags = [person.photo === "no" ? "NP" : "", person.voice === "no" ? "NV" : "", person.checkIdList ? "PK" : ""];
+  const flags = [
+    person.photo === "no" ? "NP" : "",
+    person.voice === "no" ? "NV" : "",
+    person.checkIdList ? "PK" : "",
+  ];
   return [...closeWords(person), ...cardWords(person), ...flags.filter(Boolean)];
 }
 
@@ -153,7 +171,11 @@ function countBlocks(facts: RosterFacts, form: RosterForm): Block[] {
       // No number: it could be taken for somebody's count-off number.
       number: "",
       name: point,
-      lines: [{ label: "Expect", text: expected }, { label: "Called", writeHere: true }, { label: "At the tail", writeHere: true }],
+      lines: [
+        { label: "Expect", text: expected },
+        { label: "Called", writeHere: true },
+        { label: "At the tail", writeHere: true },
+      ],
       ticks: [],
     }));
   }
@@ -184,9 +206,8 @@ function adultBlocks(facts: RosterFacts): Block[] {
 }
 
 function legend(form: RosterForm): Block {
-  const both: ListItem[] = [
-    { label: form === "table" ? "card 7" : "card", text: "see the sealed card of that number, kept by the medication lead" },
-  ];
+  const card = form === "table" ? "card 7" : "card";
+  const both: ListItem[] = [{ label: card, text: "see the sealed card of that number, kept by the medication lead" }];
   if (form === "blocks") {
     return list("labelled", [
       ...both,

@@ -1,6 +1,7 @@
 import type { z } from "zod";
 import type { Connection } from "@/db/connection";
 import type { Actor } from "./actor";
+import { fieldMessages } from "./field-messages";
 import { forbidden, invalid, notFound, type Outcome } from "./outcome";
 
 /** What a use case is given by whoever opens the door: the page, the action, the handler, the test. */
@@ -59,14 +60,4 @@ function makeUseCase<Schema extends z.ZodType, Found, Prepared, Value>(
     });
   };
   return Object.assign(useCase, { kind, input: spec.input });
-}
-
-/** One message a field, the first that applies; a nested field is named with dots. */
-export function fieldMessages(error: z.ZodError): Record<string, string> {
-  const fields: Record<string, string> = {};
-  for (const issue of error.issues) {
-    const name = issue.path.join(".") || "form";
-    fields[name] ??= issue.message;
-  }
-  return fields;
 }

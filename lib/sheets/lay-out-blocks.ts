@@ -3,7 +3,18 @@ import type { PageDesign } from "@/lib/sheets/page-design";
 import type { Mark, Part, StructureNode } from "@/lib/sheets/page-parts";
 import { setLines, textWidth } from "@/lib/sheets/set-lines";
 import type { Metrics, Span } from "@/lib/sheets/set-lines";
-import type { Block, Entry, EntryLine, Heading, List, ListItem, Note, Paragraph, Sheet, Table } from "@/lib/sheets/sheet";
+import type {
+  Block,
+  Entry,
+  EntryLine,
+  Heading,
+  List,
+  ListItem,
+  Note,
+  Paragraph,
+  Sheet,
+  Table,
+} from "@/lib/sheets/sheet";
 import type { Weight } from "@/lib/sheets/sheet-fonts";
 import { layOutTable } from "@/lib/sheets/lay-out-table";
 
@@ -127,7 +138,8 @@ function layOutNote(note: Note, document: StructureNode, { design, metrics }: Se
   for (const [text, weight] of texts) {
     const node = { type: "P", parent: document };
     for (const line of setLines([{ text, weight }], size, width, metrics)) {
-      marks.push({ kind: "text", node, x: design.left + indent, y: marks.length * lineHeight, size, lineHeight, line });
+      const y = marks.length * lineHeight;
+      marks.push({ kind: "text", node, x: design.left + indent, y, size, lineHeight, line });
     }
   }
   const height = marks.length * lineHeight;
@@ -197,7 +209,8 @@ function layOutEntries(entries: readonly Entry[], document: StructureNode, setti
   const size = design.textSize * 2;
   const list: StructureNode = { type: "L", parent: document, listNumbering: "None" };
   const widest = Math.max(0, ...entries.map((entry) => textWidth(entry.number, "bold", size, metrics)));
-  const indent = widest === 0 ? 0 : Math.max(widest, textWidth("00", "bold", size, metrics)) + design.textSize * 0.8;
+  const two = textWidth("00", "bold", size, metrics);
+  const indent = widest === 0 ? 0 : Math.max(widest, two) + design.textSize * 0.8;
   return entries.map((entry, index) => {
     const part = layOutEntry(entry, indent, list, setting);
     const spaced = index === 0 ? { ...part, before: design.textSize * 0.6 } : part;
@@ -214,7 +227,8 @@ function layOutEntry(entry: Entry, indent: number, list: StructureNode, setting:
   const number = numberMarks(entry.number, pad, { type: "Lbl", parent: item }, setting);
   const writer = new ColumnWriter(design.left + indent, design.contentWidth - indent, pad, setting);
   const nameSize = design.textSize * nameScale;
-  writer.text([{ text: entry.name, weight: "bold" }], { type: "P", parent: body }, nameSize, nameSize * nameSpacing);
+  const nameNode = { type: "P", parent: body };
+  writer.text([{ text: entry.name, weight: "bold" }], nameNode, nameSize, nameSize * nameSpacing);
   const nameBottom = writer.y;
   const nameMarks = [...writer.marks];
   for (const line of entry.lines) writeEntryLine(line, body, writer, design);
@@ -226,7 +240,13 @@ function layOutEntry(entry: Entry, indent: number, list: StructureNode, setting:
     keepWithNext: false,
     marks: [rule, ...number, ...writer.marks],
     cuts: writer.cuts,
-    continued: { height: nameBottom + design.textSize * 0.3, before: 0, keepWithNext: true, marks: [rule, ...number, ...nameMarks], cuts: [] },
+    continued: {
+      height: nameBottom + design.textSize * 0.3,
+      before: 0,
+      keepWithNext: true,
+      marks: [rule, ...number, ...nameMarks],
+      cuts: [],
+    },
   };
 }
 
@@ -297,7 +317,8 @@ class ColumnWriter {
     let x = this.x;
     this.y += design.textSize * 0.25;
     for (const word of words) {
-      const lines = setLines([{ text: word, weight: "regular" }], design.textSize, this.width - side - gap, metrics);
+      const room = this.width - side - gap;
+      const lines = setLines([{ text: word, weight: "regular" }], design.textSize, room, metrics);
       const wordWidth = Math.max(0, ...lines.map((line) => line.width));
       if (x > this.x && x + side + gap + wordWidth > this.x + this.width) {
         x = this.x;

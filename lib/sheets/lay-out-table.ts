@@ -48,7 +48,9 @@ function layOutCaption(caption: string, node: StructureNode, { design, metrics }
     height: lines.length * lineHeight + size * 0.3,
     before: size * 0.6,
     keepWithNext: true,
-    marks: lines.map((line, row) => ({ kind: "text", node, x: design.left, y: row * lineHeight, size, lineHeight, line })),
+    marks: lines.map((line, row) => ({
+      kind: "text", node, x: design.left, y: row * lineHeight, size, lineHeight, line,
+    })),
     cuts: lines.map((_, row) => (row + 1) * lineHeight),
   };
 }
@@ -57,7 +59,9 @@ function layOutHeader(columns: readonly PlacedColumn[], head: StructureNode, { d
   const size = design.textSize;
   const lineHeight = size * 1.2;
   const row: StructureNode = { type: "TR", parent: head };
-  const set = columns.map((column) => setLines([{ text: column.header, weight: "bold" }], size, column.width, metrics));
+  const set = columns.map((column) =>
+    setLines([{ text: column.header, weight: "bold" }], size, column.width, metrics),
+  );
   const deepest = Math.max(1, ...set.map((lines) => lines.length));
   const rule = 2;
   const height = deepest * lineHeight + size * 0.35 + rule;
@@ -90,7 +94,9 @@ function layOutRow(
   let deepest = Math.max(lineHeight, design.tickSide);
   const marks = columns.flatMap((column, at): Mark[] => {
     const isHeader = column.kind === "name";
-    const node: StructureNode = { type: isHeader ? "TH" : "TD", parent: row, ...(isHeader ? { scope: "Row" } : {}) };
+    const node: StructureNode = isHeader
+      ? { type: "TH", parent: row, scope: "Row" }
+      : { type: "TD", parent: row };
     if (isForPen(column)) return penMarks(column, node, pad, lineHeight, design);
     const lines = setLines([{ text: cells[at] ?? "", weight: cellWeight(column) }], size, column.width, metrics);
     if (lines.length === 0) return [{ kind: "empty", node, y: 0 }];
@@ -100,7 +106,9 @@ function layOutRow(
     }));
   });
   const height = deepest + 2 * pad;
-  const rule: Mark = { kind: "rule", x: design.left, y: height - 0.75, length: design.contentWidth, thickness: 0.75 };
+  const rule: Mark = {
+    kind: "rule", x: design.left, y: height - 0.75, length: design.contentWidth, thickness: 0.75,
+  };
   const cuts = Array.from({ length: Math.floor(deepest / lineHeight) }, (_, at) => pad + (at + 1) * lineHeight);
   return { height, before: 0, keepWithNext: false, marks: [...marks, rule], cuts };
 }
@@ -129,7 +137,8 @@ function columnNeeds(table: Table, at: number, design: PageDesign, metrics: Metr
   if (column.kind === "tick") {
     // Alike, so that the boxes stand in an even row.
     const headers = table.columns.filter(({ kind }) => kind === "tick").map(({ header }) => header);
-    const widest = Math.max(design.tickSide, ...headers.map((header) => longestWord(header, "bold", size, metrics)));
+    const words = headers.map((header) => longestWord(header, "bold", size, metrics));
+    const widest = Math.max(design.tickSide, ...words);
     return { least: widest + gutter, ideal: widest + gutter };
   }
   const cells = table.rows.map((row) => row[at] ?? "");
@@ -137,7 +146,10 @@ function columnNeeds(table: Table, at: number, design: PageDesign, metrics: Metr
   const least = Math.max(headerLeast, ...cells.map((text) => longestWord(text, weight, size, metrics)));
   const ideal = Math.max(headerLeast, ...cells.map((text) => textWidth(text, weight, size, metrics)));
   const written = column.kind === "write" ? size * 6 : 0;
-  return { least: Math.max(least, written) + gutter, ideal: Math.max(Math.min(ideal, size * 18), written * 1.5) + gutter };
+  return {
+    least: Math.max(least, written) + gutter,
+    ideal: Math.max(Math.min(ideal, size * 18), written * 1.5) + gutter,
+  };
 }
 
 /**

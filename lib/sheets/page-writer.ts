@@ -94,14 +94,18 @@ export class PageWriter {
     for (const [node, element] of this.elements) if (node.parent === null) element.end();
   }
 
-  private artifact(type: "Pagination" | "Layout" | "Page", draw: () => void, bbox?: [number, number, number, number]): void {
+  private artifact(
+    type: "Pagination" | "Layout" | "Page",
+    draw: () => void,
+    bbox?: [number, number, number, number],
+  ): void {
     this.document.markContent("Artifact", bbox === undefined ? { type } : { type, bbox });
     draw();
     this.document.endMarkedContent();
   }
 }
 
-/** Draws a page's marks in order; what belongs to one element, and neighbouring marks that say nothing, together. */
+/** Draws a page's marks in order: neighbours of one element together, and neighbours that say nothing. */
 export function drawMarks(writer: PageWriter, marks: readonly Mark[]): void {
   let from = 0;
   while (from < marks.length) {

@@ -97,7 +97,8 @@ function drawFurniture(
     furniture.head.forEach((line, row) => {
       writer.line(line, design.left, furniture.headTop + row * lineHeight, size, lineHeight);
     });
-    for (const line of setLines([{ text: pageNumber, weight: "bold" }], design.textSize, design.contentWidth, metrics)) {
+    const number = [{ text: pageNumber, weight: "bold" }] as const;
+    for (const line of setLines(number, design.textSize, design.contentWidth, metrics)) {
       const x = design.right - line.width;
       writer.line(line, x, design.top, design.textSize, design.textSize * 1.25);
     }

@@ -1,4 +1,5 @@
 import type { Route } from "next";
+import { refresh } from "next/cache";
 import { redirect } from "next/navigation";
 import { after } from "next/server";
 import type { z } from "zod";
@@ -29,7 +30,10 @@ export function formAction<Schema extends z.ZodType, Value>(useCase: UseCase<Sch
     if ("to" in next) redirect(next.to);
     if ("elsewhere" in next) redirect(next.elsewhere as Route);
     const attempt = previous.status === "fresh" ? 1 : previous.attempt + 1;
-    if ("say" in next) return { status: "done", sentence: next.say, attempt };
+    if ("say" in next) {
+      refresh(); // the page behind the sentence shows what is true now
+      return { status: "done", sentence: next.say, attempt };
+    }
     return refusedState(next.refuse, context, form, attempt);
   };
 }

@@ -7,8 +7,9 @@ import { database } from "./database";
 
 /** Who is asking, once a request. */
 export const currentActor = cache(async (): Promise<Actor> => {
+  const jar = await cookies(); // first: reading it tells the build that this page cannot be made beforehand
   const { conn, sessions } = database();
-  const cookie = (await cookies()).get(sessions.sessionCookieName)?.value;
+  const cookie = jar.get(sessions.sessionCookieName)?.value;
   if (!cookie) return visitor;
   const { session, user } = await sessions.validateSession(cookie);
   return (session && user && actorOf(conn, user.id)) ?? visitor;

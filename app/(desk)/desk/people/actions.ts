@@ -1,0 +1,14 @@
+"use server";
+
+import { changeClearance } from "@/lib/helpers/change-clearance";
+import { invite } from "@/lib/people/invite";
+import { plainDayInWords } from "@/lib/shared/dates";
+import { formAction } from "@/lib/web/form-action";
+
+export const inviteAction = formAction(invite, {
+  next: ({ name, email, role }) => ({ say: `${name} is invited as ${role}; a mail is on its way to ${email}.` }),
+});
+
+export const changeClearanceAction = formAction(changeClearance, {
+  next: ({ name, clearedUntil }) => ({ say: clearedUntil ? `${name} is cleared to ${plainDayInWords(clearedUntil)}.` : `${name} is no longer cleared.` }),
+});

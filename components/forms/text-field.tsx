@@ -1,0 +1,43 @@
+"use client";
+
+import type { ReactNode } from "react";
+import { FieldError, Hint } from "./field-parts";
+import { useField } from "./form-context";
+
+type Props = {
+  name: string;
+  label: string;
+  hint?: ReactNode;
+  type?: "text" | "email" | "tel" | "password" | "url";
+  autoComplete?: string;
+  inputMode?: "numeric" | "decimal" | "tel" | "email";
+  value?: string;
+  isShort?: boolean;
+  spellCheck?: boolean;
+};
+
+export function TextField({ name, label, hint, type = "text", autoComplete, inputMode, value = "", isShort = false, spellCheck }: Props) {
+  const field = useField(name);
+  return (
+    <div className="my-5">
+      <label htmlFor={field.id} className="block font-bold mb-0.5">
+        {label}
+      </label>
+      {hint && <Hint id={field.id}>{hint}</Hint>}
+      <FieldError id={field.id} message={field.error} />
+      <input
+        id={field.id}
+        name={name}
+        type={type}
+        defaultValue={type === "password" ? "" : field.typed(value)}
+        autoComplete={autoComplete}
+        inputMode={inputMode}
+        spellCheck={spellCheck}
+        aria-invalid={field.error ? true : undefined}
+        aria-describedby={field.describedBy(Boolean(hint))}
+        className={`field-box ${isShort ? "short" : ""}`}
+        {...field.watched}
+      />
+    </div>
+  );
+}

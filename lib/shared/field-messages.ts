@@ -1,0 +1,11 @@
+import type { z } from "zod";
+
+/** One message a field, the first that applies; a nested field is named with dots. */
+export function fieldMessages(error: z.ZodError): Record<string, string> {
+  const fields: Record<string, string> = {};
+  for (const issue of error.issues) {
+    const name = issue.path.join(".") || "form";
+    fields[name] ??= issue.message;
+  }
+  return fields;
+}
