@@ -5,6 +5,7 @@ import type { Dictionary, Json, PdfObjects } from "@/tests/support/pdf-objects";
 /**
  * The PDF/UA-1 conditions of the veraPDF profile (`PDF_UA/PDFUA-1.xml`, clause-test) that concern our sheets, read
  * from the file by qpdf. Passing them is no certification: the profile has more, and human checks have no machine.
+ * Which test number within 7.2 stands for which rule of tables and lists, and that of 7.18.1, is from memory.
  */
 export type PdfFinding = { readonly clause: string; readonly sentence: string };
 
@@ -89,7 +90,7 @@ function structureOf(objects: PdfObjects): StructureElement[] {
     const place = all.length;
     for (const kid of kidsOf(dictionary, objects)) {
       if (typeof kid === "number") content.push(`${String(dictionary["/Pg"])} ${kid}`);
-      else if (isMarkedContent(kid)) content.push(`${String(asDictionary(kid)["/Pg"] ?? dictionary["/Pg"])} ${String(asDictionary(kid)["/MCID"])}`);
+      else if (isMarkedContent(kid)) content.push(markOf(asDictionary(kid), dictionary));
       else if (objects.dictionary(kid)["/S"] !== undefined) kids.push(walk(kid, reference, type));
     }
     const isParentNamed = dictionary["/P"] === parentReference;
@@ -106,6 +107,10 @@ function kidsOf(dictionary: Dictionary, objects: PdfObjects): Json[] {
   if (kids === undefined) return [];
   const resolved = objects.resolve(kids);
   return Array.isArray(resolved) ? resolved : [kids];
+}
+
+function markOf(reference: Dictionary, element: Dictionary): string {
+  return `${String(reference["/Pg"] ?? element["/Pg"])} ${String(reference["/MCID"])}`;
 }
 
 function isMarkedContent(kid: Json): boolean {
@@ -188,7 +193,7 @@ function checkPages(objects: PdfObjects, elements: readonly StructureElement[]):
   const onPages = new Set<string>();
   const findings = objects.pages().flatMap(({ reference, page }, index) => {
     const where = `on page ${index + 1}`;
-    const painted = paintedContent(objects.stream(objects.resolve(page["/Contents"]) === null ? undefined : page["/Contents"]));
+    const painted = paintedContent(objects.stream(page["/Contents"]));
     const marks = painted.mcids.map((mcid) => `${reference} ${mcid}`);
     marks.forEach((mark) => onPages.add(mark));
     const annotations = objects.array(page["/Annots"]).map((one) => objects.dictionary(one));
@@ -198,7 +203,11 @@ function checkPages(objects: PdfObjects, elements: readonly StructureElement[]):
       ...found(painted.taggedInsideArtifacts > 0, "7.1-2", `Tagged content stands inside an artifact ${where}.`),
       ...found(painted.unmarked.length > 0, "7.1-3", `${painted.unmarked.join(" ")} paints without a mark ${where}.`),
       ...found(marks.some((mark) => !inTree.has(mark)), "7.1-3", `Tagged content ${where} is not in the tree.`),
-      ...found(annotations.length > 0 && page["/Tabs"] !== "/S", "7.18.3-1", `The tab order ${where} is not the tree's.`),
+      ...found(
+        annotations.length > 0 && page["/Tabs"] !== "/S",
+        "7.18.3-1",
+        `The tab order ${where} is not the tree's.`,
+      ),
       ...found(silent.length > 0, "7.18.1-2", `An annotation ${where} says nothing.`),
     ];
   });
@@ -210,7 +219,9 @@ function checkFonts(objects: PdfObjects): PdfFinding[] {
   return objects.pages().flatMap(({ page }) => {
     const fonts = objects.dictionary(objects.dictionary(page["/Resources"])["/Font"]);
     const { codesByFont } = paintedContent(objects.stream(page["/Contents"]));
-    return [...codesByFont].flatMap(([name, codes]) => checkFont(name, codes, objects.dictionary(fonts[`/${name}`]), objects));
+    return [...codesByFont].flatMap(([name, codes]) => {
+      return checkFont(name, codes, objects.dictionary(fonts[`/${name}`]), objects);
+    });
   });
 }
 

@@ -45,7 +45,11 @@ export function saltgrassRoster(more: Partial<RosterFacts> = {}): RosterFacts {
 /** A roster of as many people as asked for. */
 export function rosterOf(count: number): RosterFacts {
   const people = Array.from({ length: count }, (_, at) =>
-    person(at + 1, `Robin ${at + 1}`, { adultId: at % 2 === 0 ? "dee" : "marcus", travel: ["cane"], actionNotes: ["shade every 20 minutes"] }),
+    person(at + 1, `Robin ${at + 1}`, {
+      adultId: at % 2 === 0 ? "dee" : "marcus",
+      travel: ["cane"],
+      actionNotes: ["shade every 20 minutes"],
+    }),
   );
   return saltgrassRoster({ people });
 }

@@ -4,9 +4,11 @@ import { tmpdir } from "node:os";
 import path from "node:path";
 import { describe, expect, it } from "vitest";
 import { heading, list, note, paragraph } from "@/lib/sheets/sheet";
-import type { Block, Entry, Sheet, Table } from "@/lib/sheets/sheet";
+import type { Block, Column, Entry, Sheet, Table } from "@/lib/sheets/sheet";
 import { charactersWithoutFont, toPdf } from "@/lib/sheets/to-pdf";
 import type { PdfOptions } from "@/lib/sheets/to-pdf";
+import { readOperations } from "@/tests/support/pdf-content";
+import { readPdfObjects } from "@/tests/support/pdf-objects";
 import { checkPdfConditions } from "@/tests/support/pdf-conditions";
 import { readStructure, withRole } from "@/tests/support/pdf-reading";
 
@@ -176,6 +178,24 @@ describe("a sheet as a PDF", () => {
     expect(charactersWithoutFont(sheet)).toEqual(["🐦", "ש", "ר", "ה"]);
   });
 
+  it("draws boxes of one centimetre in large print, one for each word", async () => {
+    const objects = readPdfObjects(await toPdf(sheetOf([entryOf(1, "wait"), entryOf(2, "wait")]), largePrint));
+    const operations = objects.pages().flatMap(({ page }) => readOperations(objects.stream(page["/Contents"])));
+    const squares = operations.filter(({ operator, operands }) => operator === "re" && operands[2] === operands[3]);
+    expect(squares).toHaveLength(4);
+    for (const { operands } of squares) expect((Number(operands[2]) * 2.54) / 72).toBeCloseTo(1, 3);
+  });
+
+  it("says on the next page whose block goes on there", async () => {
+    const long = "shade every 20 minutes and then wait ".repeat(12);
+    const bytes = await toPdf(sheetOf([entryOf(7, long)]), { ...standard, textSizePt: 36 });
+    const pages = poppler("pdftotext", [], bytes).split("\f").filter((page) => page.includes("minutes"));
+    expect(pages.length).toBeGreaterThan(1);
+    for (const page of pages) expect(page).toContain("Robin 7");
+    const names = withRole(await readStructure(bytes), "P").filter(({ text }) => text.includes("Robin 7"));
+    expect(names).toHaveLength(1);
+  });
+
   it("never skips a heading level", async () => {
     const bytes = await toPdf(sheetOf([heading(4, "Too deep"), paragraph("x")]), standard);
     expect(checkPdfConditions(bytes)).toEqual([]);
@@ -183,10 +203,13 @@ describe("a sheet as a PDF", () => {
   });
 
   it("turns the pages for a table too wide to stand upright", async () => {
+    const letters = [..."abcdefgh"];
+    const ticks = letters.map((letter): Column => ({ header: `Boardwalk${letter}`, kind: "tick" }));
     const wide: Table = {
-      kind: "table", caption: "Wide.",
-      columns: [{ header: "Name", kind: "name" }, ..."abcdefgh".split("").map((letter) => ({ header: `Boardwalk${letter}`, kind: "tick" as const }))],
-      rows: [["Robin", ..."abcdefgh".split("").map(() => "")]],
+      kind: "table",
+      caption: "Wide.",
+      columns: [{ header: "Name", kind: "name" }, ...ticks],
+      rows: [["Robin", ...letters.map(() => "")]],
     };
     expect(placedWords(await toPdf(sheetOf([wide]), standard)).width).toBe(792);
     expect(placedWords(await toPdf(sheetOf([tableOf(3)]), standard)).width).toBe(612);
