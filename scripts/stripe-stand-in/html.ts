@@ -1,0 +1,6 @@
+const ENTITIES: Record<string, string> = { "&": "&amp;", "<": "&lt;", ">": "&gt;", '"': "&quot;", "'": "&#39;" };
+
+/** Text made safe to stand in HTML, between tags or in a quoted attribute. */
+export function escapeHtml(text: string): string {
+  return text.replace(/[&<>"']/g, (character) => ENTITIES[character] ?? character);
+}

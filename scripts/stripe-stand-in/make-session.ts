@@ -1,0 +1,83 @@
+import type Stripe from "stripe";
+import type { SessionRecord } from "./records";
+
+/** The session as the API answers it. Only an open session has an address to pay at. */
+export function makeSession(session: SessionRecord, publicUrl: string) {
+  const paid = session.status === "complete";
+  return {
+    id: session.id,
+    object: "checkout.session",
+    adaptive_pricing: null,
+    after_expiration: null,
+    allow_promotion_codes: null,
+    allowed_payment_method_types: null,
+    amount_subtotal: session.amountTotal,
+    amount_total: session.amountTotal,
+    automatic_tax: { enabled: false, liability: null, provider: null, status: null },
+    billing_address_collection: null,
+    cancel_url: session.cancelUrl,
+    client_reference_id: session.clientReferenceId,
+    client_secret: null,
+    collected_information: null,
+    consent: null,
+    consent_collection: null,
+    created: session.created,
+    currency: session.currency,
+    currency_conversion: null,
+    custom_fields: [],
+    custom_text: { after_submit: null, shipping_address: null, submit: null, terms_of_service_acceptance: null },
+    customer: null,
+    customer_account: null,
+    customer_creation: "if_required",
+    customer_details: customerDetails(session),
+    customer_email: session.customerEmail,
+    discounts: [],
+    expires_at: session.expiresAt,
+    integration_identifier: null,
+    invoice: null,
+    invoice_creation: null,
+    livemode: false,
+    locale: null,
+    managed_payments: null,
+    metadata: session.metadata,
+    mode: "payment",
+    origin_context: null,
+    payment_intent: session.paymentIntentId,
+    payment_link: null,
+    payment_method_collection: "if_required",
+    payment_method_configuration_details: null,
+    payment_method_options: {},
+    payment_method_types: ["card"],
+    payment_status: paid ? "paid" : "unpaid",
+    permissions: null,
+    phone_number_collection: { enabled: false },
+    recovered_from: null,
+    saved_payment_method_options: null,
+    setup_intent: null,
+    shipping_address_collection: null,
+    shipping_cost: null,
+    shipping_options: [],
+    status: session.status,
+    submit_type: null,
+    subscription: null,
+    success_url: session.successUrl,
+    total_details: { amount_discount: 0, amount_shipping: 0, amount_tax: 0 },
+    ui_mode: "hosted_page",
+    url: session.status === "open" ? `${publicUrl}/pay/${session.id}` : null,
+    wallet_options: null,
+  } satisfies Stripe.Checkout.Session;
+}
+
+function customerDetails(session: SessionRecord): Stripe.Checkout.Session.CustomerDetails | null {
+  if (session.customerEmail === null) return null;
+  return {
+    address: null,
+    business_name: null,
+    email: session.customerEmail,
+    individual_name: null,
+    name: null,
+    phone: null,
+    tax_exempt: "none",
+    tax_ids: null,
+  };
+}
