@@ -54,14 +54,13 @@ function People({ people, isWanting = false }: { people: Person[]; isWanting?: b
 function Load({ share }: { share: number[] }) {
   const total = share.reduce((sum, part) => sum + part, 0);
   const most = Math.max(100, total);
-  let from = 0;
   return (
     <>
       <svg viewBox="0 0 200 14" className="load w-full h-3.5 mt-2" aria-hidden="true" preserveAspectRatio="none">
         <rect x="1" y="1" width="198" height="12" fill="var(--card)" stroke="var(--edge)" strokeWidth="2" />
         {share.map((part, index) => {
-          const x = (from / most) * 196 + 2;
-          from += part;
+          const before = share.slice(0, index).reduce((sum, one) => sum + one, 0);
+          const x = (before / most) * 196 + 2;
           return <rect key={index} x={x} y="2" width={Math.max(1, (part / most) * 196 - 2)} height="10" fill={total > 100 ? "var(--madder)" : "var(--marsh)"} />;
         })}
       </svg>

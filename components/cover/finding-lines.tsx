@@ -16,37 +16,67 @@ const marks: Record<Finding["severity"], { kind: StateKind; word: string; look: 
   stops: { kind: "stop", word: "Short.", look: "stop" },
 };
 
-/** Each question with its findings: the rule, what is needed, what there is, how many short, one thing to do. */
+const worstFirst = ["stops", "warns", "met"] as const;
+
+/** The six questions, each with its worst answer as its mark, and under it what was found. */
 export function FindingLines({ findings }: { findings: readonly Finding[] }) {
   return (
     <ul className="lines">
-      {coverQuestions.flatMap((question) =>
-        findings
-          .filter((finding) => finding.question === question)
-          .map((finding, index) => (
-            <li key={`${question}-${index}`} className="mark-row">
-              <StateMark kind={marks[finding.severity].kind} />
-              <div>
-                <h3 className="text-[1.05rem]">{names[question]}</h3>
-                <p>
-                  <span className={`word ${marks[finding.severity].look}`}>{marks[finding.severity].word}</span> {finding.sentence}
-                </p>
-                {finding.action && (
-                  <p>
-                    <strong>Do this:</strong> {finding.action}
-                  </p>
-                )}
-                <p className="text-quiet">Source: {finding.source}</p>
-              </div>
-              <p className="mid:text-right text-quiet">
-                {finding.short > 0 ? <strong className="text-ink">short by {finding.short}</strong> : null}
-                <span className="block">
-                  needed {finding.needed}, have {finding.have}
-                </span>
-              </p>
-            </li>
-          )),
-      )}
+      {coverQuestions.map((question) => {
+        const own = findings.filter((finding) => finding.question === question);
+        const worst = worstFirst.find((severity) => own.some((finding) => finding.severity === severity)) ?? "met";
+        return (
+          <li key={question} className="mark-row">
+            <StateMark kind={marks[worst].kind} />
+            <div>
+              <h3 className="text-[1.1rem]">
+                {names[question]}: <span className={`word ${marks[worst].look}`}>{marks[worst].word}</span>
+              </h3>
+              {own.length === 0 && <p>Nothing to judge yet.</p>}
+              {worstFirst.flatMap((severity) => own.filter((finding) => finding.severity === severity)).map((finding) => (
+                <FoundThis key={`${finding.rule}-${finding.sentence}`} finding={finding} isOneOfMany={own.length > 1} />
+              ))}
+              <Sources findings={own} />
+            </div>
+          </li>
+        );
+      })}
     </ul>
+  );
+}
+
+function FoundThis({ finding, isOneOfMany }: { finding: Finding; isOneOfMany: boolean }) {
+  const mark = marks[finding.severity];
+  return (
+    <div className="mt-2">
+      <p>
+        {isOneOfMany && <strong>{mark.word} </strong>}
+        {finding.sentence}{" "}
+        <span className="text-quiet">
+          (needed {finding.needed}, have {finding.have}
+          {finding.short > 0 ? `, short by ${finding.short}` : ""})
+        </span>
+      </p>
+      {finding.action && (
+        <p>
+          <strong>Do this:</strong> {finding.action}
+        </p>
+      )}
+    </div>
+  );
+}
+
+function Sources({ findings }: { findings: Finding[] }) {
+  const sources = [...new Set(findings.map((finding) => finding.source))];
+  if (sources.length === 0) return null;
+  return (
+    <details>
+      <summary className="text-quiet font-normal!">Where the figures come from</summary>
+      <ul className="list-disc pl-6">
+        {sources.map((source) => (
+          <li key={source}>{source}</li>
+        ))}
+      </ul>
+    </details>
   );
 }

@@ -1,6 +1,6 @@
 "use client";
 
-import { startTransition, useActionState, useMemo, useRef, useState, type FormEvent, type ReactNode } from "react";
+import { startTransition, useActionState, useId, useMemo, useState, type FormEvent, type ReactNode } from "react";
 import { get, set, useForm, type FieldErrors, type FieldValues } from "react-hook-form";
 import type { z } from "zod";
 import { fieldMessages } from "@/lib/shared/field-messages";
@@ -28,8 +28,8 @@ export function GuidedForm({ action, schema, submit, carry = {}, children }: Pro
   const [state, dispatch, pending] = useActionState(action, freshForm);
   const [localAttempt, setLocalAttempt] = useState(0);
   const [answered, setAnswered] = useState(0);
-  const form = useRef<HTMLFormElement>(null);
-  const resolver = useMemo(() => resolverFor(schema, () => form.current), [schema]);
+  const formId = useId();
+  const resolver = useMemo(() => resolverFor(schema, formId), [schema, formId]);
   const { register, trigger, formState } = useForm<FieldValues>({ mode: "onTouched", reValidateMode: "onChange", resolver });
 
   const refused = state.status === "refused" ? state : null;
@@ -53,7 +53,7 @@ export function GuidedForm({ action, schema, submit, carry = {}, children }: Pro
       {isLocal && Object.keys(local).length > 0 && <ErrorSummary sentence="There is a problem" fields={local} attempt={localAttempt} />}
       {!isLocal && refused && <ErrorSummary sentence={refused.sentence} fields={refused.fields} attempt={1000 + refused.attempt} />}
       <DoneMessage sentence={state.status === "done" ? state.sentence : ""} />
-      <form ref={form} action={dispatch} onSubmit={(event) => void submitForm(event)} noValidate>
+      <form id={formId} action={dispatch} onSubmit={(event) => void submitForm(event)} noValidate>
         <Carried carry={carry} />
         {children}
         <SubmitButton text={submit} look="first" pending={pending} />
@@ -63,10 +63,10 @@ export function GuidedForm({ action, schema, submit, carry = {}, children }: Pro
 }
 
 /** Reads the form element rather than the watched values: unticked boxes and hidden fields count as the server counts them. */
-function resolverFor(schema: z.ZodType, form: () => HTMLFormElement | null) {
+function resolverFor(schema: z.ZodType, formId: string) {
   return async (values: FieldValues) => {
-    const element = form();
-    const parsed = schema.safeParse(element ? readForm(new FormData(element)) : values);
+    const element = document.getElementById(formId);
+    const parsed = schema.safeParse(element instanceof HTMLFormElement ? readForm(new FormData(element)) : values);
     if (parsed.success) return { values, errors: {} };
     const errors: FieldErrors = {};
     for (const [name, message] of Object.entries(fieldMessages(parsed.error))) set(errors, name, { type: "schema", message });

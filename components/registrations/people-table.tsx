@@ -1,5 +1,7 @@
-import { supportInWords, type AccessProfile } from "@/lib/families/access-profile";
+import { DataTable } from "@/components/ui/data-table";
+import { guideNeedOf, supportInWords, type AccessProfile } from "@/lib/families/access-profile";
 import type { Step } from "@/lib/registrations/registration";
+import { counted } from "@/lib/shared/words";
 
 type Person = {
   id: string;
@@ -22,39 +24,31 @@ export function PeopleTable({ people }: { people: Person[] }) {
   const live = people.filter((person) => person.state !== "withdrawn");
   if (live.length === 0) return <p className="mt-3">Nobody is registered yet.</p>;
   return (
-    <div className="scroll-x mt-3" role="region" aria-label="People of this outing" tabIndex={0}>
-      <table>
-        <caption className="sr-only">People of this outing</caption>
-        <thead>
-          <tr>
-            <th scope="col">Name</th>
-            <th scope="col">State</th>
-            <th scope="col">Missing</th>
-            <th scope="col">Gets around</th>
-            <th scope="col">Guide</th>
-            <th scope="col">Support</th>
-            <th scope="col">This time</th>
-          </tr>
-        </thead>
-        <tbody>
-          {live.map((person) => (
-            <tr key={person.id}>
-              <th scope="row">
-                {person.number === null ? "" : `${person.number}. `}
-                {person.nameUsed}, {person.age}
-              </th>
-              <td>{stateInWords(person)}</td>
-              <td>{person.missing.length === 0 ? "Nothing" : person.missing.map((step) => missingWords[step]).join(", ")}</td>
-              <td>{person.profile ? `${person.profile.travel.join(", ")}${person.profile.chair ? `, ${person.profile.chair}` : ""}` : "Not told yet"}</td>
-              <td>{person.profile ? `${person.profile.guideWhen.join(", ")}; ${person.profile.guideSide} arm, ${person.profile.guideHold}` : "Not told yet"}</td>
-              <td>{person.profile ? supportInWords[person.profile.support] : "Not told yet"}</td>
-              <td>{person.thisTime || "Nothing different"}</td>
-            </tr>
-          ))}
-        </tbody>
-      </table>
-    </div>
+    <DataTable
+      caption={counted(live.length, "person", "people")}
+      columns={["Name", "State", "Missing", "Gets around", "Guide", "Support", "This time"]}
+      rows={live.map((person) => ({
+        key: person.id,
+        name: `${person.number === null ? "" : `${person.number}. `}${person.nameUsed}, ${person.age}`,
+        cells: [
+          stateInWords(person),
+          person.missing.length === 0 ? "nothing" : person.missing.map((step) => missingWords[step]).join(", "),
+          ...needsInWords(person.profile),
+          person.thisTime || "nothing different",
+        ],
+      }))}
+    />
   );
+}
+
+function needsInWords(profile: AccessProfile | null): string[] {
+  if (!profile) return ["not told yet", "not told yet", "not told yet"];
+  const chair = profile.chair ? `, ${profile.chair}` : "";
+  return [
+    `${profile.travel.join(", ")}${chair}`,
+    guideNeedOf(profile) === "not-needed" ? "not needed" : `${profile.guideWhen.join(", ")}; ${profile.guideSide} arm, ${profile.guideHold}`,
+    supportInWords[profile.support],
+  ];
 }
 
 function stateInWords(person: Person): string {

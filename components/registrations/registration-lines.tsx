@@ -24,7 +24,7 @@ export function RegistrationLines({ registrations }: { registrations: Registrati
                 {one.child.nameUsed}: {one.outing.title}
               </Link>
               <p>
-                {one.outing.when}. {one.outing.siteName}.
+                {one.outing.whenAndWhere}
               </p>
               <p>
                 <span className={`word ${mark.look}`}>{mark.word}</span> {one.stateInWords}

@@ -11,12 +11,12 @@ export function PageHeading({ title, crumbs = [], facts }: { title: string; crum
       {crumbs.length > 0 && (
         <nav aria-label="Where you are">
           <ol className="flex flex-wrap gap-x-2 mb-1">
-            {crumbs.map((crumb) => (
+            {crumbs.map((crumb, index) => (
               <li key={crumb.href}>
+                {index > 0 && <span aria-hidden="true">/ </span>}
                 <Link href={crumb.href} prefetch={false} className="inline-block py-1">
                   {crumb.text}
                 </Link>
-                <span aria-hidden="true"> /</span>
               </li>
             ))}
           </ol>

@@ -51,9 +51,10 @@ export type GuideNeed = "throughout" | "at-times" | "not-needed";
 
 /** "Not sure" is counted as a need: the day is planned for it until somebody has talked to the family. */
 export function guideNeedOf(profile: AccessProfile): GuideNeed {
+  if (profile.guideWhen.every((when) => when === "not needed")) return "not-needed";
   if (profile.guideHold === "spoken directions only" && !profile.guideWhen.includes("all the time")) return "at-times";
   if (profile.guideWhen.includes("all the time")) return "throughout";
-  return profile.guideWhen.every((when) => when === "not needed") ? "not-needed" : "at-times";
+  return "at-times";
 }
 
 /** Who reads each part of the answers; stands beside the question. */

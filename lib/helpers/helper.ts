@@ -41,5 +41,5 @@ export function abilitiesInWords(record: HelperRecord | null): string {
   if (record.pushesChair) can.push("pushes a chair");
   if (record.firstAid) can.push("first aid");
   if (record.drives) can.push("drives");
-  return can.length === 0 ? "Does not guide. Counts in full." : `${can.join(", ")}.`.replace(/^./, (first) => first.toUpperCase());
+  return can.length === 0 ? "Does not guide." : `${can.join(", ")}.`.replace(/^./, (first) => first.toUpperCase());
 }

@@ -1,8 +1,7 @@
 import { knex, type Connection } from "@/db/connection";
-import type { MessageRow } from "@/db/tables";
 import { newId } from "@/lib/shared/ids";
 import { minutesLater } from "@/lib/shared/dates";
-import { retryAfterMinutes, withoutSecrets, type Letter, type Message, type MessageKind } from "./message";
+import { retryAfterMinutes, withoutSecrets, type DeliveryView, type Letter, type Message, type MessageKind } from "./message";
 
 type Queued = Message & {
   toAddress: string;
@@ -92,19 +91,6 @@ export function noteProblem(conn: Connection, due: DueMessage, problem: string, 
       }),
   );
 }
-
-export type DeliveryView = {
-  id: string;
-  kind: MessageKind;
-  toAddress: string;
-  state: MessageRow["state"];
-  attempts: number;
-  lastProblem: string | null;
-  subject: string | null;
-  textBody: string | null;
-  createdAt: string;
-  sentAt: string | null;
-};
 
 export function listDeliveries(conn: Connection, filter: { outingId?: string; unsentOnly?: boolean }): DeliveryView[] {
   const query = knex("messages")

@@ -53,3 +53,19 @@ export const messageKindInWords: Record<MessageKind, string> = {
 export function withoutSecrets(text: string): string {
   return text.replaceAll(/(\/link\/)[\w-]{20,}/g, "$1(kept out)");
 }
+
+export const messageStates = ["queued", "sending", "sent", "failed", "cancelled"] as const;
+
+/** A mail as the desk sees it. */
+export type DeliveryView = {
+  id: string;
+  kind: MessageKind;
+  toAddress: string;
+  state: (typeof messageStates)[number];
+  attempts: number;
+  lastProblem: string | null;
+  subject: string | null;
+  textBody: string | null;
+  createdAt: string;
+  sentAt: string | null;
+};

@@ -1,5 +1,6 @@
 import { dayInWords, hoursInWords, monthOf } from "@/lib/shared/dates";
 import { moneyInWords } from "@/lib/shared/money";
+import { sentence } from "@/lib/shared/words";
 import { agesInWords, outingDay, roomInWords, roomOf, takesRegistrations, whenInWords, type Outing, type OutingState, type Room } from "./outing";
 
 /** An outing as a list or a page shows it; nothing here is private. */
@@ -20,6 +21,8 @@ export type OutingView = {
   dayInWords: string;
   hours: string;
   when: string;
+  /** A whole sentence. */
+  whenAndWhere: string;
   ages: string;
   youngestAge: number;
   oldestAge: number;
@@ -55,6 +58,7 @@ export function outingView(outing: Outing, now: string): OutingView {
     dayInWords: dayInWords(outing.startsAt, site.zone),
     hours: hoursInWords(outing.startsAt, outing.endsAt, site.zone),
     when: whenInWords(outing),
+    whenAndWhere: sentence(`${whenInWords(outing)}, ${site.name}`),
     ages: agesInWords(outing),
     youngestAge: outing.youngestAge,
     oldestAge: outing.oldestAge,

@@ -9,7 +9,10 @@ import { findOuting } from "./outing-store";
 /** One outing as an RFC 5545 calendar file, for everybody: so without where to meet, which is told to those who come. */
 export const showOutingCalendar = defineQuery({
   input: slugSchema,
-  load: (conn, _actor, { slug }, now) => findOuting(conn, { slug }, now),
+  load: (conn, _actor, { slug }, now) => {
+    const outing = findOuting(conn, { slug }, now);
+    return outing && isPublic(outing) ? outing : null;
+  },
   allow: (_actor, outing) => isPublic(outing),
   run: ({ found: outing, now }) => ok({ slug: outing.slug, calendar: calendarOf(outing, now, outing.summary) }),
 });
@@ -32,5 +35,5 @@ export function calendarOf(outing: Outing, now: string, description = outing.mee
     url: publicAddress(`/outings/${outing.slug}`),
     status: outing.state === "called off" ? ICalEventStatus.CANCELLED : ICalEventStatus.CONFIRMED,
   });
-  return calendar.toString();
+  return `${calendar.toString()}\r\n`;
 }

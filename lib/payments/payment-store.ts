@@ -69,18 +69,19 @@ export function noteEvent(conn: Connection, now: string, event: { id: string; ty
   return changes === 1;
 }
 
-export type MoneyToReturn = { paymentId: string; nameUsed: string; amountCents: number; currency: string; why: "withdrawn" | "paid twice" };
+export type MoneyToReturn = { paymentId: string; nameUsed: string; amountCents: number; currency: string; why: "withdrawn" | "paid twice" | "called off" };
 
-/** Paid, and nothing for it: a withdrawn seat, or the second of two payments. */
+/** Paid, and nothing for it: a withdrawn seat, an outing called off, or the second of two payments. */
 export function listMoneyToReturn(conn: Connection): MoneyToReturn[] {
   const rows = conn.all(
     knex("payments as p")
       .join("registrations as r", "r.id", "p.registration_id")
       .join("participants as c", "c.id", "r.participant_id")
+      .join("outings as o", "o.id", "r.outing_id")
       .where({ "p.kind": "checkout" })
       .whereNotNull("p.settled_at")
       .where((either) => {
-        either.where("p.state", "abandoned").orWhereIn("r.state", ["withdrawn", "turned away"]);
+        either.where("p.state", "abandoned").orWhereIn("r.state", ["withdrawn", "turned away"]).orWhere("o.state", "called off");
       })
       .orderBy("p.settled_at")
       .select("p.id", "c.name_used", "p.amount_cents", "p.currency", "r.state"),

@@ -1,5 +1,6 @@
 import type { Connection } from "@/db/connection";
 import { gatherCover, type Coming } from "@/lib/cover-board/gather-cover";
+import { checkCover } from "@/lib/cover/check-cover";
 import type { CoverAdult } from "@/lib/cover/cover";
 import { guideNeedOf } from "@/lib/families/access-profile";
 import type { Outing } from "@/lib/outings/outing";
@@ -13,6 +14,9 @@ const countPoints = ["Arrive", "Leave", "Midway", "Back"];
 export function gatherRoster(conn: Connection, outing: Outing, now: string): RosterFacts {
   const { input, coming } = gatherCover(conn, outing, now);
   const zone = outing.site.zone;
+  const standings = checkCover(input).adults;
+  // Who does not count for anything, such as somebody whose clearance lapsed, is not named as anybody's adult.
+  const mayBeWithPeople = (id: string) => standings.some((one) => one.adultId === id && one.standing !== "does-not-count");
   return {
     programme: env().PROGRAMME_NAME,
     outingTitle: outing.title,
@@ -25,7 +29,7 @@ export function gatherRoster(conn: Connection, outing: Outing, now: string): Ros
     printedAt: now,
     basePhone: env().PROGRAMME_PHONE,
     people: coming.map((one) => personFrom(one, input.pairings.find((pair) => pair.personId === one.registration.id)?.adultId ?? null)),
-    adults: input.adults.filter((adult) => adult.answer === "yes").map(adultFrom),
+    adults: input.adults.filter((adult) => mayBeWithPeople(adult.id)).map(adultFrom),
     countPoints,
   };
 }
@@ -42,7 +46,8 @@ function personFrom({ registration, profile }: Coming, adultId: string | null): 
   if (guide !== "not-needed") notes.push(guideNote(guide, profile));
   if (profile.chair === "pushed") notes.push("push the chair");
   if (profile.restAfter !== "not sure" && profile.restAfter !== "60") notes.push(`sit down every ${profile.restAfter} minutes`);
-  if (profile.leaderNote !== "") notes.push(profile.leaderNote);
+  if (profile.travel.includes("walker")) notes.push("uses a walker");
+  if (profile.leaderNote !== "") notes.push(profile.leaderNote.replace(/[.;]+$/, ""));
   return {
     number: registration.seatNumber,
     nameUsed: registration.participant.nameUsed,

@@ -143,9 +143,15 @@ export type NeverOnPaperFinding = {
 export function checkNeverOnPaper(sheet: Sheet, known: readonly string[] = []): NeverOnPaperFinding[] {
   const innocent = known.filter((text) => text.trim() !== "").toSorted((one, other) => other.length - one.length);
   return sheetTexts(sheet).flatMap(({ where, text }) => {
-    const rest = innocent.reduce((left, part) => left.replaceAll(part, " … "), text);
+    const rest = innocent.reduce((left, part) => left.replace(wholeWords(part), " … "), text);
     return neverOnPaper.flatMap((rule) => findingsOf(rule, rest, where));
   });
+}
+
+/** A known text as whole words: the name "Al" says nothing about "allergy". */
+function wholeWords(part: string): RegExp {
+  const literal = part.replace(/[.*+?^${}()|[\]\\]/g, "\\$&");
+  return new RegExp(`(?<![\\p{L}\\p{N}])${literal}(?![\\p{L}\\p{N}])`, "gu");
 }
 
 function findingsOf(rule: NeverOnPaper, text: string, where: string): NeverOnPaperFinding[] {

@@ -52,7 +52,8 @@ export const printRoster = defineCommand({
   },
 });
 
-/** The programme's own words, which may look like what must never be on paper: its phone, the place, the title. */
+/** What may look like something that must never be on paper and is not: the programme's phone, place and title, and people's names. */
 function knownTexts(facts: ReturnType<typeof gatherRoster>): string[] {
-  return [facts.basePhone, facts.meetingPoint, facts.outingTitle, facts.siteName, facts.programme, facts.dateInWords, facts.printedAtInWords];
+  const names = [...facts.people.map((person) => person.nameUsed), ...facts.adults.map((adult) => adult.name)];
+  return [...names, facts.basePhone, facts.meetingPoint, facts.outingTitle, facts.siteName, facts.programme, facts.dateInWords, facts.printedAtInWords];
 }

@@ -5,7 +5,7 @@ export function fieldMessages(error: z.ZodError): Record<string, string> {
   const fields: Record<string, string> = {};
   for (const issue of error.issues) {
     const name = issue.path.join(".") || "form";
-    fields[name] ??= issue.message;
+    if (!Object.hasOwn(fields, name)) fields[name] = issue.message;
   }
   return fields;
 }

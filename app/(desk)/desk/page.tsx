@@ -61,7 +61,7 @@ export default async function DeskPage() {
                   {outing.title}
                 </Link>
                 <p>
-                  {outing.when}. {outing.siteName}.
+                  {outing.whenAndWhere}
                 </p>
                 <p>{verdict?.sentence ?? "Called off."}</p>
               </div>

@@ -22,7 +22,7 @@ export default async function FieldPage() {
                 {day.title}
               </Link>
               <p>
-                {day.when}. {day.siteName}.
+                {day.whenAndWhere}
               </p>
             </li>
           ))}

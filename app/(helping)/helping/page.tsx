@@ -29,7 +29,7 @@ export default async function HelpingPage() {
         <section key={one.answerId} className="panel mt-5" aria-labelledby={`asked-${one.answerId}`}>
           <h3 id={`asked-${one.answerId}`}>{one.outing.title}</h3>
           <p>
-            {one.outing.when}. {one.outing.siteName}. {one.task === "leader" ? "You are asked to lead." : "You are asked as a chaperone."}
+            {one.outing.whenAndWhere} {one.task === "leader" ? "You are asked to lead." : "You are asked as a chaperone."}
           </p>
           <ActionForm action={answerRequestAction} submit="Send my answer" look={one.state === "asked" ? "first" : "second"} carry={{ answerId: one.answerId }} answer="below">
             <Choices

@@ -3,6 +3,7 @@ import { ActionForm } from "@/components/forms/action-form";
 import { Choices, type Choice } from "@/components/forms/choices";
 import { SelectField } from "@/components/forms/select-field";
 import { TextField } from "@/components/forms/text-field";
+import { DataTable } from "@/components/ui/data-table";
 import { PageHeading } from "@/components/ui/page-heading";
 import { abilitiesInWords } from "@/lib/helpers/helper";
 import { listPeople } from "@/lib/people/list-people";
@@ -33,31 +34,20 @@ export default async function PeoplePage() {
       <PageHeading title="People" crumbs={[{ href: "/desk", text: "Desk" }]} facts={`${people.length} accounts, ${helpers.length} of them people who help.`} />
       <section aria-labelledby="helpers" className="mt-8">
         <h2 id="helpers">Who helps</h2>
-        <div className="scroll-x mt-3" role="region" aria-label="Who helps" tabIndex={0}>
-          <table>
-            <caption className="sr-only">Adults who help, what they can do and until when they are cleared</caption>
-            <thead>
-              <tr>
-                <th scope="col">Name</th>
-                <th scope="col">Roles</th>
-                <th scope="col">Can</th>
-                <th scope="col">Of age</th>
-                <th scope="col">Cleared to</th>
-              </tr>
-            </thead>
-            <tbody>
-              {helpers.map((person) => (
-                <tr key={person.id}>
-                  <th scope="row">{person.name}</th>
-                  <td>{person.roles.join(", ")}</td>
-                  <td>{abilitiesInWords(person.helper)}</td>
-                  <td>{person.helper?.isAdult ? "Yes" : "Not said"}</td>
-                  <td>{person.helper?.clearedUntil ? plainDayInWords(person.helper.clearedUntil) : "Not cleared"}</td>
-                </tr>
-              ))}
-            </tbody>
-          </table>
-        </div>
+        <DataTable
+          caption="Adults who help, what they can do and until when they are cleared"
+          columns={["Name", "Roles", "Can", "Of age", "Cleared to"]}
+          rows={helpers.map((person) => ({
+            key: person.id,
+            name: person.name,
+            cells: [
+              person.roles.join(", "),
+              abilitiesInWords(person.helper),
+              person.helper?.isAdult ? "yes" : "not said",
+              person.helper?.clearedUntil ? plainDayInWords(person.helper.clearedUntil) : "not cleared",
+            ],
+          }))}
+        />
         <h3 className="mt-8">Note a clearance</h3>
         <p className="mt-1">Only the last day is kept; what was found in a check is not.</p>
         <ActionForm action={changeClearanceAction} submit="Save" look="second">

@@ -17,7 +17,7 @@ export default async function FieldDayPage({ params }: Props) {
   const me = await ask(showMe, {});
   return (
     <>
-      <PageHeading title={outing.title} crumbs={[{ href: "/field", text: "The days you lead" }]} facts={`${outing.when}. ${outing.siteName}. Base: ${facts.basePhone}.`} />
+      <PageHeading title={outing.title} crumbs={[{ href: "/field", text: "The days you lead" }]} facts={`${outing.whenAndWhere} Base: ${facts.basePhone}.`} />
       <section aria-labelledby="roster" className="mt-8">
         <h2 id="roster">Roster</h2>
         <p className="mt-2 font-bold">{totalsInWords(facts)}</p>

@@ -75,7 +75,7 @@ async function AnswerPage({ secret }: { secret: string }) {
   const { outing } = request;
   return (
     <>
-      <PageHeading title={`Can you help at ${outing.title}?`} facts={`${outing.when}. ${outing.siteName}.`} />
+      <PageHeading title={`Can you help at ${outing.title}?`} facts={outing.whenAndWhere} />
       <p className="mt-4">
         Hello {request.name}. We ask you to {request.task === "leader" ? "lead this outing" : "come along as a chaperone"}. {states[request.state]}
       </p>

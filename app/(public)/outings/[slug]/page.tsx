@@ -24,7 +24,7 @@ export default async function OutingPage({ params }: Props) {
   const actor = await currentActor();
   return (
     <>
-      <PageHeading title={outing.title} crumbs={[{ href: "/outings", text: "Outings" }]} facts={`${outing.when}. ${outing.siteName}.`} />
+      <PageHeading title={outing.title} crumbs={[{ href: "/outings", text: "Outings" }]} facts={outing.whenAndWhere} />
       <Call name={outing.title} className="w-64 max-w-full h-16" />
       {outing.state === "draft" && <Verdict kind="wait" sentence="A draft: only staff see this page." />}
       {outing.room === "called off" && (

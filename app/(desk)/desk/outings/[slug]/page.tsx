@@ -36,7 +36,7 @@ export default async function OutingDeskPage({ params }: Props) {
       <PageHeading
         title={outing.title}
         crumbs={[{ href: "/desk", text: "Desk" }]}
-        facts={`${outing.when}. ${outing.siteName}. ${facts.confirmed} coming, ${facts.helpers.yes} adults, ${outing.waiting} waiting.`}
+        facts={`${outing.whenAndWhere} ${facts.confirmed} coming, ${facts.helpers.yes} adults, ${outing.waiting} waiting.`}
       />
       <DeskRooms slug={slug} here="Readiness" />
       {isLive ? (
@@ -88,7 +88,13 @@ export default async function OutingDeskPage({ params }: Props) {
       </section>
       <section aria-labelledby="mails" className="mt-14">
         <h2 id="mails">Mails of this outing</h2>
-        <DeliveryTable deliveries={deliveries} zone={outing.zone} caption="Newest first" />
+        <p className="mt-2">{deliveriesInWords(deliveries)}</p>
+        {deliveries.length > 0 && (
+          <details className="mt-2">
+            <summary>Show the mails</summary>
+            <DeliveryTable deliveries={deliveries} zone={outing.zone} caption="Newest first" />
+          </details>
+        )}
       </section>
       {isLive && (
         <section aria-labelledby="off" className="mt-14 max-w-[44rem]">
@@ -101,6 +107,12 @@ export default async function OutingDeskPage({ params }: Props) {
       )}
     </>
   );
+}
+
+function deliveriesInWords(deliveries: { state: string }[]): string {
+  const sent = deliveries.filter((one) => one.state === "sent").length;
+  if (deliveries.length === 0) return "None yet.";
+  return sent === deliveries.length ? `All ${sent} are sent.` : `${sent} of ${deliveries.length} are sent.`;
 }
 
 const marks: Record<ReadinessState, { kind: StateKind; look: string; word: string }> = {

@@ -29,7 +29,7 @@ export default async function RegistrationPage({ params }: Props) {
   const nextStep = stepsLeft[0];
   return (
     <>
-      <PageHeading title={`${child.nameUsed}: ${outing.title}`} crumbs={[{ href: "/family", text: "Your family" }]} facts={`${outing.when}. ${outing.siteName}.`} />
+      <PageHeading title={`${child.nameUsed}: ${outing.title}`} crumbs={[{ href: "/family", text: "Your family" }]} facts={outing.whenAndWhere} />
       <Verdict kind={verdictKind(registration)} sentence={registration.stateInWords}>
         {registration.state === "held" && nextStep && (
           <>

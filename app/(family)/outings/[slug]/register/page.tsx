@@ -8,6 +8,7 @@ import { showOuting } from "@/lib/outings/show-outing";
 import { ageOn } from "@/lib/shared/dates";
 import { ask } from "@/lib/web/ask";
 import { pathTo } from "@/lib/web/paths";
+import { sentence } from "@/lib/shared/words";
 import { registerChildAction } from "./actions";
 
 export const metadata: Metadata = { title: "Register a child" };
@@ -24,7 +25,7 @@ export default async function RegisterPage({ params }: Props) {
       <PageHeading
         title={outing.room === "full" ? "Join the waiting list" : "Register a child"}
         crumbs={[{ href: "/outings", text: "Outings" }, { href: pathTo.outing(slug), text: outing.title }]}
-        facts={`${outing.title}. ${outing.when}. ${outing.roomInWords}, ${outing.ages}.`}
+        facts={`${outing.title}. ${sentence(outing.when)} ${outing.roomInWords}, ${outing.ages}.`}
       />
       {!outing.takesRegistrations ? (
         <p className="mt-6">

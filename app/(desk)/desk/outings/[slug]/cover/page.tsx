@@ -12,6 +12,7 @@ import { COVER_CAUTION } from "@/lib/cover/cover";
 import { showOuting } from "@/lib/outings/show-outing";
 import { ask } from "@/lib/web/ask";
 import { pathTo } from "@/lib/web/paths";
+import { sentence } from "@/lib/shared/words";
 import { checkCoverAction, pairPeopleAction } from "./actions";
 
 export const metadata: Metadata = { title: "Cover" };
@@ -28,7 +29,7 @@ export default async function CoverPage({ params }: Props) {
       <PageHeading
         title="Cover"
         crumbs={[{ href: "/desk", text: "Desk" }, { href: pathTo.deskOuting(slug), text: outing.title }]}
-        facts={`${outing.when}. Policy: ${policy.name}, version ${policy.version}.`}
+        facts={`${sentence(outing.when)} Policy: ${policy.name}, version ${policy.version}.`}
       />
       <DeskRooms slug={slug} here="Cover" />
       <Verdict kind={verdict.covered ? "good" : "stop"} sentence={verdict.sentence}>

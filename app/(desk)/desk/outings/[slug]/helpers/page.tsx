@@ -10,6 +10,7 @@ import { showOuting } from "@/lib/outings/show-outing";
 import { plainDayInWords } from "@/lib/shared/dates";
 import { ask } from "@/lib/web/ask";
 import { pathTo } from "@/lib/web/paths";
+import { sentence } from "@/lib/shared/words";
 import { askToHelpAction } from "./actions";
 
 export const metadata: Metadata = { title: "Adults of an outing" };
@@ -34,7 +35,7 @@ export default async function HelpersPage({ params }: Props) {
       <PageHeading
         title="Adults"
         crumbs={[{ href: "/desk", text: "Desk" }, { href: pathTo.deskOuting(slug), text: outing.title }]}
-        facts={`${yes.length} said yes${notCleared.length === 0 ? "" : `; ${notCleared.length} of them not cleared for that day`}. ${outing.when}.`}
+        facts={`${yes.length} said yes${notCleared.length === 0 ? "" : `; ${notCleared.length} of them not cleared for that day`}. ${sentence(outing.when)}`}
       />
       <DeskRooms slug={slug} here="Adults" />
       {answers.length === 0 ? (
