@@ -12,7 +12,7 @@ export function proxy(request: NextRequest) {
     `script-src 'self' 'nonce-${nonce}' 'strict-dynamic'${isDevelopment ? " 'unsafe-eval'" : ""}`,
     "style-src 'self' 'unsafe-inline'",
     "img-src 'self' data:",
-    "font-src 'self'",
+    "font-src 'self' data:", // the month grid brings its icons along in its own style
     "media-src 'self'",
     "object-src 'none'",
     "base-uri 'self'",

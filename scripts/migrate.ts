@@ -1,3 +1,4 @@
+import "./read-env-file";
 import { mkdirSync } from "node:fs";
 import path from "node:path";
 import createKnex from "knex";

@@ -7,7 +7,7 @@ import { NavLink } from "./nav-link";
 /** Which doors somebody has; the doors themselves decide who may pass. */
 function doorsFor(actor: Actor): { href: Route; text: string }[] {
   const doors: { href: Route; text: string }[] = [];
-  if (isStaff(actor)) doors.push({ href: "/desk", text: "Desk" }, { href: "/desk/people", text: "People" });
+  if (isStaff(actor)) doors.push({ href: "/desk", text: "Desk" }, { href: "/desk/people", text: "People" }, { href: "/desk/sites", text: "Sites" });
   doors.push({ href: "/outings", text: "Outings" }, { href: "/models", text: "Teaching models" });
   if (hasRole(actor, "guardian")) doors.push({ href: "/family", text: "Family" });
   if (hasRole(actor, "chaperone", "leader")) doors.push({ href: "/helping", text: "Helping" });

@@ -1,5 +1,5 @@
 import { z } from "zod";
-import { isClockTime, isDay } from "@/lib/shared/dates";
+import { isClockTime, isDay, isTimeZone } from "@/lib/shared/dates";
 import { centsFromTyped } from "@/lib/shared/money";
 import { listOf } from "@/lib/shared/typed";
 
@@ -58,13 +58,26 @@ export const changeOutingSchema = z
   .object({ ...outingFields, slug: z.string(), edition: z.coerce.number().int() })
   .superRefine(refineOuting);
 
+export const addSiteSchema = z.object({
+  name: line("the site's name", 100),
+  landManager: line("who manages the land", 120),
+  zone: z.string().trim().refine(isTimeZone, "Enter a time zone by its IANA name, such as America/Los_Angeles."),
+  ground: line("what is underfoot", 200),
+  meetingPoint: line("the meeting point in a sentence", 300),
+});
+
 export const slugSchema = z.object({ slug: z.string().min(1).max(80) });
 
 export const callOffSchema = slugSchema.extend({
   because: line("the reason, in a sentence families will read", 500),
 });
 
+const instantOrDay = z.union(
+  [z.iso.datetime({ offset: true }), day],
+  "Give a day such as 2027-01-09, or an instant such as 2027-01-09T17:00:00Z.",
+);
+
 export const rangeSchema = z
-  .object({ from: z.iso.datetime({ offset: true }).or(day), to: z.iso.datetime({ offset: true }).or(day) })
+  .object({ from: instantOrDay, to: instantOrDay })
   .refine(({ from, to }) => Date.parse(from) < Date.parse(to), "The start of the range must be before its end.")
   .refine(({ from, to }) => Date.parse(to) - Date.parse(from) <= 400 * 86_400_000, "Ask for 400 days or fewer at a time.");

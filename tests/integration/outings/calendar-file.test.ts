@@ -50,6 +50,7 @@ describe("the calendar file of an outing", () => {
     expect(event.location).toBe("Heron Spit");
     expect(Math.max(...file.split("\r\n").map((line) => Buffer.byteLength(line)))).toBeLessThanOrEqual(75);
     expect(file.replaceAll("\r\n", "")).not.toMatch(/[\r\n]/);
+    expect(file.endsWith("END:VCALENDAR\r\n")).toBe(true);
   });
 
   it("replaces an earlier one: the same UID, a higher SEQUENCE, and CANCELLED once it is called off", async () => {
@@ -71,6 +72,6 @@ describe("the calendar file of an outing", () => {
     const { event } = read(calendar);
     expect(event.description).toBe("We listen to a flock turn.");
     expect(calendar).not.toContain("bench");
-    expect((await refused(world, visitor, showOutingCalendar, { slug: makeOuting(world, { state: "draft" }).slug })).kind).not.toBe("invalid");
+    expect((await refused(world, visitor, showOutingCalendar, makeOuting(world, { state: "draft" }))).kind).toBe("not-found");
   });
 });

@@ -154,10 +154,10 @@ describe("the public list", () => {
     makeOuting(world, { title: "Too late", day: "2027-02-06" });
     const list = await allowed(world, visitor, listOutings, { from: "2027-01-01", to: "2027-02-01" });
     expect(list.map((one) => one.title)).toEqual(["First", "Second", "Third"]);
-    const while_on = await allowed(world, visitor, listOutings, { from: "2027-01-09T19:00:00Z", to: "2027-01-09T19:30:00Z" });
-    expect(while_on.map((one) => one.title)).toEqual(["First"]);
-    const just_after = await allowed(world, visitor, listOutings, { from: "2027-01-09T20:00:00Z", to: "2027-01-10T00:00:00Z" });
-    expect(just_after).toEqual([]);
+    const during = await allowed(world, visitor, listOutings, { from: "2027-01-09T19:00:00Z", to: "2027-01-09T19:30:00Z" });
+    expect(during.map((one) => one.title)).toEqual(["First"]);
+    const justAfter = await allowed(world, visitor, listOutings, { from: "2027-01-09T20:00:00Z", to: "2027-01-10T00:00:00Z" });
+    expect(justAfter).toEqual([]);
   });
 
   it.each([
