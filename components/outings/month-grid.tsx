@@ -23,7 +23,7 @@ export function MonthGrid({ firstMonth }: { firstMonth: string }) {
   }
 
   return (
-    <section aria-labelledby={heading} className="mt-6 month-grid">
+    <section aria-label="Month grid" className="mt-6 month-grid">
       <div className="flex flex-wrap items-center gap-3">
         <button type="button" className="button second" onClick={() => go(-1)}>
           Month before

@@ -45,7 +45,7 @@ function personFrom({ registration, profile }: Coming, adultId: string | null): 
   const notes: string[] = [];
   if (guide !== "not-needed") notes.push(guideNote(guide, profile));
   if (profile.chair === "pushed") notes.push("push the chair");
-  if (profile.restAfter !== "not sure" && profile.restAfter !== "60") notes.push(`sit down every ${profile.restAfter} minutes`);
+  if (profile.restAfter !== "not sure" && profile.restAfter !== "60") notes.push(`sit down every ${profile.restAfter} min`);
   if (profile.travel.includes("walker")) notes.push("uses a walker");
   if (profile.leaderNote !== "") notes.push(profile.leaderNote.replace(/[.;]+$/, ""));
   return {
@@ -58,17 +58,18 @@ function personFrom({ registration, profile }: Coming, adultId: string | null): 
     cardNumber: null,
     photo: profile.photo === "yes" ? "ok" : "no",
     voice: profile.voice === "yes" ? "ok" : "no",
-    checkIdList: true,
+    // Everybody is handed over against the list; the mark is for a hand-over that needs the base first.
+    checkIdList: false,
   };
 }
 
-/** The side is the guide's arm, as the family was asked; the hold is theirs too. */
+/** Short, for a narrow column: when, the guide's arm, and the hold where it is not the common one above the elbow. */
 function guideNote(guide: "throughout" | "at-times", profile: Coming["profile"]): string {
-  if (profile.guideHold === "spoken directions only") return "guide by spoken directions";
-  const arm = profile.guideSide === "either" ? "either arm" : `guide's ${profile.guideSide} arm`;
-  const hold = profile.guideHold === "hand" ? "by the hand" : profile.guideHold;
-  const when = guide === "throughout" ? "guide all the time" : `guide: ${profile.guideWhen.filter((one) => one !== "not needed" && one !== "not sure").join(", ") || "ask"}`;
-  return `${when}, ${arm}, ${hold}`;
+  if (profile.guideHold === "spoken directions only") return "spoken directions only";
+  const times = profile.guideWhen.filter((one) => one !== "not needed" && one !== "not sure");
+  const when = guide === "throughout" ? "guide all the time" : times.length === 0 ? "ask about a guide" : `guide: ${times.join(", ")}`;
+  const arm = profile.guideSide === "either" ? "either arm" : `${profile.guideSide} arm`;
+  return profile.guideHold === "above the elbow" ? `${when}, ${arm}` : `${when}, ${arm}, ${profile.guideHold}`;
 }
 
 function adultFrom(adult: CoverAdult): RosterAdult {

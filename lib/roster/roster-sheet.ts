@@ -228,6 +228,6 @@ function caution(facts: RosterFacts): Block {
   return note(
     "Before you rely on this",
     `This is the working list of ${facts.programme}. Follow each person's plan and the people qualified to carry it ` +
-      `out. In an emergency call the local emergency number first, then the base at ${facts.basePhone}.`,
+      `out. Hand people over only to somebody on the family's list, against photo identification. In an emergency call the local emergency number first, then the base at ${facts.basePhone}.`,
   );
 }

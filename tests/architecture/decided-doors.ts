@@ -70,6 +70,11 @@ export const decisions: Readonly<Record<string, Decision>> = {
   listDesk: { to: staff, input: nothing },
   showOutingDesk: { to: staff, input: open },
   showOutingForm: { to: staff, input: draft },
+  listAllSites: { to: staff, input: nothing },
+  addSite: {
+    to: staff,
+    input: () => ({ name: "Cinder Hill", landManager: "Saltgrass County", zone: "America/Los_Angeles", ground: "Cinders.", meetingPoint: "The gate." }),
+  },
   planOuting: { to: staff, input: (given) => ({ ...planned(given), requestId: newId() }) },
   changeOuting: { to: staff, input: (given) => ({ ...planned(given), ...open(given), edition: "1" }) },
   publishOuting: { to: staff, input: draft },

@@ -6,6 +6,9 @@ import { expect, test } from "./support/test";
 const themes = ["light", "dark", "contrast"] as const;
 /** WCAG 2.2 to level AA with its contrast of level AAA, and what the makers of axe call good practice. */
 const tags = ["wcag2a", "wcag2aa", "wcag21a", "wcag21aa", "wcag22aa", "best-practice"];
+const colourRules = ["color-contrast", "color-contrast-enhanced", "link-in-text-block"];
+
+test.describe.configure({ mode: "parallel" });
 
 test.describe("every page, in each theme", () => {
   for (const visit of visits) {
@@ -35,22 +38,19 @@ test.describe("every page, in each theme", () => {
   });
 });
 
-test("every page has a title of its own, one first heading, its language, and a way past its header", async ({ open }) => {
-  const titles = new Map<string, string[]>();
-  const pages = new Map<string, Page>();
+test("every page has a title of its own", async ({ open }) => {
+  const paths = new Map<string, string[]>();
+  const windows = new Map<string, Page>();
   for (const visit of visits.filter((one) => one.act === undefined)) {
     const key = typeof visit.as === "string" ? visit.as : visit.name;
-    const page = pages.get(key) ?? (await open(personFor(visit)));
-    pages.set(key, page);
+    const page = windows.get(key) ?? (await open(personFor(visit)));
+    windows.set(key, page);
     const path = await visit.path();
-    await page.goto(path, { waitUntil: "domcontentloaded" });
-    await expect(page.getByRole("heading", { level: 1 }), path).toHaveCount(1);
-    await expect(page.locator("html"), path).toHaveAttribute("lang", "en");
-    await expect(page.locator("body > a").first(), path).toHaveText("Skip to the content");
-    const title = await page.title();
-    titles.set(title, [...(titles.get(title) ?? []), path.replace(/^\/link\/.*/, "/link")]);
+    const title = /<title>([^<]+)<\/title>/.exec(await (await page.request.get(path)).text())?.[1] ?? "";
+    expect(title, path).not.toBe("");
+    paths.set(title, [...(paths.get(title) ?? []), path.replace(/^\/link\/.*/, "/link")]);
   }
-  for (const [title, paths] of titles) expect(new Set(paths).size, `"${title}": ${paths.join(", ")}`).toBe(1);
+  for (const [title, given] of paths) expect([...new Set(given)], title).toHaveLength(1);
 });
 
 test("a look that was chosen is there from the first byte of every page, and without one the device decides", async ({ open }) => {
@@ -74,16 +74,20 @@ test("a look that was chosen is there from the first byte of every page, and wit
 });
 
 async function expectAccessible(page: Page): Promise<void> {
+  await expect(page.getByRole("heading", { level: 1 })).toHaveCount(1);
+  await expect(page.locator("html")).toHaveAttribute("lang", "en");
+  await expect(page.locator("body > a").first()).toHaveText("Skip to the content");
   for (const theme of themes) {
     await page.evaluate((name) => document.documentElement.setAttribute("data-theme", name), theme);
+    // The themes change colours and nothing else of the page, so what is not about colour is asked once.
+    const isFirst = theme === "light";
+    const runOnly = isFirst ? ({ type: "tag", values: tags } as const) : ({ type: "rule", values: colourRules } as const);
+    const rules = { "color-contrast-enhanced": { enabled: true } };
     // One frame only, so the older way of running is enough, and it opens no second window.
-    const axe = new AxeBuilder({ page }).setLegacyMode(true).options({
-      runOnly: { type: "tag", values: tags },
-      rules: { "color-contrast-enhanced": { enabled: true } },
-    });
+    const axe = new AxeBuilder({ page }).setLegacyMode(true).options({ runOnly, rules, resultTypes: ["violations"] });
     const { violations, passes } = await axe.analyze();
     expect(violations.map(inWords), `${page.url()} in ${theme}`).toEqual([]);
-    expect(passes.length).toBeGreaterThan(10);
+    expect(passes.map((pass) => pass.id)).toContain("color-contrast-enhanced");
   }
   await expectNoSidewaysScroll(page, 320, "100"); // 1280 pixels at 400 %: WCAG 2.2, 1.4.10
   await expectNoSidewaysScroll(page, 640, "200"); // 1280 pixels at 200 %, with our own largest text

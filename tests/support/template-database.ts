@@ -11,7 +11,7 @@ declare module "vitest" {
   }
 }
 
-/** Migrates one database for the whole run: with the program's own script, so that it is tested too. */
+/** Migrates one database for the whole run, with the program's own script, so that it is tested too. */
 export default function setup(project: TestProject): () => void {
   const folder = mkdtempSync(path.join(tmpdir(), "dunlin-template-"));
   const file = path.join(folder, "template.sqlite");
@@ -20,5 +20,8 @@ export default function setup(project: TestProject): () => void {
     stdio: ["ignore", "ignore", "inherit"],
   });
   project.provide("templateDatabase", file);
-  return () => rmSync(folder, { recursive: true, force: true });
+  const { FILES_DIR } = project.config.env;
+  return () => {
+    for (const place of [folder, FILES_DIR]) if (place) rmSync(place, { recursive: true, force: true });
+  };
 }

@@ -61,6 +61,7 @@ const deskPages: Visit[] = [
   { name: "the papers of an outing", path: fixed(`/desk/outings/${spit}/papers`), as: "coordinator" },
   { name: "changing an outing", path: fixed(`/desk/outings/${spit}/edit`), as: "coordinator" },
   { name: "the mails", path: fixed("/desk/messages"), as: "coordinator" },
+  { name: "the sites", path: fixed("/desk/sites"), as: "coordinator" },
   { name: "the people", path: fixed("/desk/people"), as: "admin" },
 ];
 

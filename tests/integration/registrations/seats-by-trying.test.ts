@@ -144,8 +144,9 @@ it(`${tries} random days of ${stepsEach} steps: no seat is sold twice, nobody si
     const story: string[] = [];
     for (let at = 0; at < stepsEach && world.now < found.startsAt; at += 1) {
       story.push(await step(one, pick));
-      expect(seenIn(one), `day ${seed}: ${story.join("; ")}`).toEqual(expectedOf(one));
-      for (const state of seenIn(one).states) visited.add(state);
+      const seen = seenIn(one);
+      expect(seen, `day ${seed}: ${story.join("; ")}`).toEqual(expectedOf(one));
+      for (const state of seen.states) visited.add(state);
     }
     world.conn.raw.exec("rollback");
   }

@@ -1,28 +1,18 @@
-import { mkdtempSync, rmSync } from "node:fs";
-import { tmpdir } from "node:os";
-import path from "node:path";
-import { afterAll, beforeAll, describe, expect, it } from "vitest";
+import { beforeAll, describe, expect, it } from "vitest";
 import { storeFile } from "@/lib/files/file-store";
+import { env } from "@/lib/shared/env";
 import { sha256 } from "@/lib/shared/ids";
 import { fileResponse } from "@/lib/web/file-response";
 import { openDatabaseCopy } from "../../support/database";
 
 const bytes = Buffer.from("0123456789");
 const file = { sha256: sha256(bytes), bytes: 10, mediaType: "audio/wav" };
-let clean: () => void;
 
 beforeAll(() => {
-  const folder = mkdtempSync(path.join(tmpdir(), "dunlin-files-"));
-  process.env.FILES_DIR = folder;
   const { conn, remove } = openDatabaseCopy();
-  storeFile(conn, "2027-01-04T18:00:00.000Z", folder, { bytes, mediaType: "audio/wav" });
-  clean = () => {
-    remove();
-    rmSync(folder, { recursive: true, force: true });
-  };
+  storeFile(conn, "2027-01-04T18:00:00.000Z", env().FILES_DIR, { bytes, mediaType: "audio/wav" });
+  return remove;
 });
-
-afterAll(() => clean());
 
 const asked = (range: string | null) => fileResponse(file, { name: "a.wav", range, download: false });
 
