@@ -24,8 +24,6 @@ export function proxy(request: NextRequest) {
   headers.set("content-security-policy", policy);
   const response = NextResponse.next({ request: { headers } });
   response.headers.set("content-security-policy", policy);
-  response.headers.set("referrer-policy", "same-origin");
-  response.headers.set("x-content-type-options", "nosniff");
   return response;
 }
 

@@ -12,11 +12,13 @@ export type PersonRow = {
   created_at: string;
 };
 export type PersonRoleRow = { person_id: string; role: "guardian" | "chaperone" | "leader" | "coordinator" | "admin" };
+export type SessionRow = { id: string; user_id: string; expires_at: number };
 export type MailLinkRow = {
   secret_hash: string;
   purpose: "confirm-email" | "sign-in" | "invitation" | "answer";
   person_id: string;
   about_id: string | null;
+  carries: string | null;
   made_at: string;
   expires_at: string;
   used_at: string | null;
@@ -113,7 +115,7 @@ export type PaymentRow = {
   kind: "checkout" | "no-fee";
   amount_cents: number;
   currency: string;
-  state: "pending" | "settled" | "abandoned";
+  state: "pending" | "settled" | "abandoned" | "returned";
   checkout_session_id: string | null;
   checkout_url: string | null;
   payment_intent_id: string | null;
@@ -190,6 +192,7 @@ declare module "knex/types/tables" {
   interface Tables {
     people: PersonRow;
     person_roles: PersonRoleRow;
+    sessions: SessionRow;
     mail_links: MailLinkRow;
     sign_in_attempts: SignInAttemptRow;
     households: HouseholdRow;

@@ -4,7 +4,7 @@ import { env } from "@/lib/shared/env";
 import { alreadyRegistered, confirmEmail, invitation, signInLink } from "./account-letters";
 import { LetterPage } from "./letter-page";
 import { letterText, type Draft } from "./letter-parts";
-import { askedToHelp, calledOff, meetingPoint, onTheWaitingList, registrationConfirmed, seatOffered } from "./outing-letters";
+import { askedToHelp, calledOff, meetingPoint, onTheWaitingList, outingChanged, registrationConfirmed, seatOffered } from "./outing-letters";
 
 /** The mail for a message: subject, HTML, complete plain text, and a calendar file where there is one. */
 export async function composeLetter(message: Message): Promise<Letter> {
@@ -41,6 +41,8 @@ function draftOf(message: Message): Draft {
       return askedToHelp(message.facts);
     case "meeting-point":
       return meetingPoint(message.facts);
+    case "outing-changed":
+      return outingChanged(message.facts);
     case "called-off":
       return calledOff(message.facts);
   }

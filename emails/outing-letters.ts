@@ -71,8 +71,22 @@ export function meetingPoint({ name, outing, task, phone }: MessageFacts["meetin
       heading("How to find us"),
       written(outing.meetingText),
       heading("Before you come"),
-      paragraph("Who you guide and what helps them is told on the day or on your own page, never by mail. If you cannot come after all, tell us at once: it may decide whether the outing can go."),
+      paragraph("Who you guide and what helps them is told on the day, never by mail. If you cannot come after all, tell us at once: it may decide whether the outing can go."),
       link("Your outings", publicAddress("/helping")),
+    ],
+  };
+}
+
+export function outingChanged({ name, outing }: MessageFacts["outing-changed"]): Draft {
+  return {
+    subject: `Changed: ${outing.title} on ${outing.day}`,
+    parts: [
+      keyFacts(outing),
+      paragraph(`Hello ${name}, something about this outing has changed. Above and below is how it stands now; please use this and forget earlier mails.`),
+      heading("Where to meet"),
+      written(outing.meetingText),
+      link("The outing's page", publicAddress(`/outings/${outing.slug}`)),
+      paragraph("If it no longer suits you, tell us on your own page, or call."),
     ],
   };
 }

@@ -46,6 +46,8 @@ async function people(knex: Knex) {
     t.text("purpose").notNullable().checkIn(["confirm-email", "sign-in", "invitation", "answer"]);
     t.text("person_id").notNullable().references("people.id").onDelete("CASCADE");
     t.text("about_id");
+    // What takes effect when the link is followed, such as a new account's password hash.
+    t.text("carries");
     t.text("made_at").notNullable();
     t.text("expires_at").notNullable();
     t.text("used_at");
@@ -183,8 +185,9 @@ async function papersAndMoney(knex: Knex) {
   });
   await knex.schema.createTable("signatures", (t) => {
     t.text("id").primary();
-    t.text("registration_id").notNullable().unique().references("registrations.id");
+    t.text("registration_id").notNullable().references("registrations.id");
     t.text("waiver_text_id").notNullable().references("waiver_texts.id");
+    t.unique(["registration_id", "waiver_text_id"]);
     t.text("text_sha256").notNullable();
     t.text("signed_by").notNullable().references("people.id");
     t.text("typed_name").notNullable();
@@ -197,7 +200,7 @@ async function papersAndMoney(knex: Knex) {
     t.text("kind").notNullable().checkIn(["checkout", "no-fee"]);
     t.integer("amount_cents").notNullable();
     t.text("currency").notNullable();
-    t.text("state").notNullable().checkIn(["pending", "settled", "abandoned"]);
+    t.text("state").notNullable().checkIn(["pending", "settled", "abandoned", "returned"]);
     t.text("checkout_session_id").unique();
     t.text("checkout_url");
     t.text("payment_intent_id");

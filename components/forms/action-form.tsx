@@ -16,20 +16,22 @@ type Props = {
   children?: ReactNode;
   /** Whether the answer is shown above the form; a row of small forms shows it below. */
   answer?: "above" | "below";
+  /** Where a page has several forms with the same fields: something that tells this one apart. */
+  scope?: string;
 };
 
 /** A form that works before and without JavaScript: errors, values and answers come from the server. */
-export function ActionForm({ action, submit, look = "first", carry = {}, children, answer = "above" }: Props) {
+export function ActionForm({ action, submit, look = "first", carry = {}, children, answer = "above", scope = "" }: Props) {
   const [state, dispatch, pending] = useActionState(action, freshForm);
   const refused = state.status === "refused" ? state : null;
   const result = (
     <>
-      {refused && <ErrorSummary sentence={refused.sentence} fields={refused.fields} attempt={refused.attempt} />}
+      {refused && <ErrorSummary scope={scope} sentence={refused.sentence} fields={refused.fields} attempt={refused.attempt} />}
       <DoneMessage sentence={state.status === "done" ? state.sentence : ""} />
     </>
   );
   return (
-    <FormFactsProvider value={{ values: refused?.values ?? null, errors: refused?.fields ?? {} }}>
+    <FormFactsProvider value={{ scope, values: refused?.values ?? null, errors: refused?.fields ?? {} }}>
       {answer === "above" && result}
       <form action={dispatch} noValidate>
         <Carried carry={carry} />

@@ -1,10 +1,9 @@
 "use client";
 
 import type { ReactNode } from "react";
+import type { Choice } from "./choice";
 import { FieldError, Hint } from "./field-parts";
 import { useField } from "./form-context";
-
-export type Choice = { value: string; label: string; hint?: string };
 
 type Props = {
   name: string;
@@ -53,9 +52,4 @@ export function Choices({ name, legend, hint, choices, chosen = [], pick }: Prop
       })}
     </fieldset>
   );
-}
-
-/** The same words on the form as in the data, with a capital. */
-export function choicesOf(values: readonly string[], words: Readonly<Record<string, string>> = {}): Choice[] {
-  return values.map((value) => ({ value, label: words[value] ?? value.replace(/^./, (first) => first.toUpperCase()) }));
 }

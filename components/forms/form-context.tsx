@@ -11,12 +11,14 @@ type Watcher = {
 
 /** What every field of a form needs to know: what was typed, what is wrong, and who watches while typing. */
 export type FormFacts = {
+  /** Tells the fields of one form from those of another on the same page. */
+  scope: string;
   values: FormValues | null;
   errors: Record<string, string>;
   watch?: (name: string) => Watcher;
 };
 
-const FormContext = createContext<FormFacts>({ values: null, errors: {} });
+const FormContext = createContext<FormFacts>({ scope: "", values: null, errors: {} });
 
 export const FormFactsProvider = FormContext.Provider;
 
@@ -29,14 +31,14 @@ export type Field = {
   watched: Watcher | Record<string, never>;
 };
 
-/** Ids derive from the field's name, so a summary, a hint and an error always find their field. */
-export function fieldId(name: string): string {
-  return `field-${name.replaceAll(".", "-")}`;
+/** Ids derive from the form's scope and the field's name, so a summary, a hint and an error always find their field. */
+export function fieldId(scope: string, name: string): string {
+  return `field-${scope === "" ? "" : `${scope}-`}${name.replaceAll(".", "-")}`;
 }
 
 export function useField(name: string): Field {
   const form = useContext(FormContext);
-  const id = fieldId(name);
+  const id = fieldId(form.scope, name);
   const error = form.errors[name];
   const sent = form.values?.[name];
   return {

@@ -49,7 +49,7 @@ export function GuidedForm({ action, schema, submit, carry = {}, children }: Pro
   }
 
   return (
-    <FormFactsProvider value={{ values: refused?.values ?? null, errors, watch: (name) => register(name) }}>
+    <FormFactsProvider value={{ scope: "", values: refused?.values ?? null, errors, watch: (name) => register(name) }}>
       {isLocal && Object.keys(local).length > 0 && <ErrorSummary sentence="There is a problem" fields={local} attempt={localAttempt} />}
       {!isLocal && refused && <ErrorSummary sentence={refused.sentence} fields={refused.fields} attempt={1000 + refused.attempt} />}
       <DoneMessage sentence={state.status === "done" ? state.sentence : ""} />

@@ -1,7 +1,7 @@
 "use client";
 
 import type { ReactNode } from "react";
-import type { Choice } from "./choices";
+import type { Choice } from "./choice";
 import { FieldError, Hint } from "./field-parts";
 import { useField } from "./form-context";
 

@@ -5,6 +5,7 @@ const rooms = [
   { path: "/helpers", text: "Adults" },
   { path: "/cover", text: "Cover" },
   { path: "/papers", text: "Papers" },
+  { path: "/contacts", text: "Contacts" },
 ] as const;
 
 /** The rooms of one outing at the desk. */

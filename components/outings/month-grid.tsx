@@ -1,6 +1,7 @@
 "use client";
 
 import dayGridPlugin from "@fullcalendar/daygrid";
+import listPlugin from "@fullcalendar/list";
 import FullCalendar from "@fullcalendar/react";
 import { addMonths, format, parse, startOfMonth } from "date-fns";
 import { useId, useRef, useState } from "react";
@@ -11,6 +12,8 @@ import "./month-grid.css";
 /** Its buttons and heading are ours, since the grid's own fail an accessibility check; what it draws are links. */
 export function MonthGrid({ firstMonth }: { firstMonth: string }) {
   const calendar = useRef<FullCalendar>(null);
+  // Seven columns do not fit a narrow screen or a large zoom: there the month is a list, drawn by the same calendar.
+  const [isNarrow] = useState(() => window.matchMedia("(max-width: 44rem)").matches);
   const heading = useId();
   const [month, setMonth] = useState(() => parse(firstMonth, "yyyy-MM", new Date()));
   const { data, error, isLoading } = useSWR<OutingView[], Error>(rangeAddress(month), fetchOutings, { keepPreviousData: true });
@@ -31,7 +34,7 @@ export function MonthGrid({ firstMonth }: { firstMonth: string }) {
         <button type="button" className="button second" onClick={() => go(1)}>
           Month after
         </button>
-        <h2 id={heading} aria-live="polite">
+        <h2 id={heading}>
           {format(month, "MMMM yyyy")}
         </h2>
       </div>
@@ -40,8 +43,9 @@ export function MonthGrid({ firstMonth }: { firstMonth: string }) {
       </p>
       <FullCalendar
         ref={calendar}
-        plugins={[dayGridPlugin]}
-        initialView="dayGridMonth"
+        plugins={[dayGridPlugin, listPlugin]}
+        initialView={isNarrow ? "listMonth" : "dayGridMonth"}
+        noEventsContent="No outings this month."
         initialDate={month}
         headerToolbar={false}
         dayMaxEvents={false}

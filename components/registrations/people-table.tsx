@@ -26,7 +26,7 @@ export function PeopleTable({ people }: { people: Person[] }) {
   return (
     <DataTable
       caption={counted(live.length, "person", "people")}
-      columns={["Name", "State", "Missing", "Gets around", "Guide", "Support", "This time"]}
+      columns={["Name", "State", "Missing", "Gets around", "Guide", "Support", "Guardian", "This time"]}
       rows={live.map((person) => ({
         key: person.id,
         name: `${person.number === null ? "" : `${person.number}. `}${person.nameUsed}, ${person.age}`,
@@ -34,6 +34,7 @@ export function PeopleTable({ people }: { people: Person[] }) {
           stateInWords(person),
           person.missing.length === 0 ? "nothing" : person.missing.map((step) => missingWords[step]).join(", "),
           ...needsInWords(person.profile),
+          person.guardianStays ?? "not told yet",
           person.thisTime || "nothing different",
         ],
       }))}

@@ -1,6 +1,7 @@
 "use client";
 
-import { Choices, choicesOf } from "@/components/forms/choices";
+import { choicesOf } from "@/components/forms/choice";
+import { Choices } from "@/components/forms/choices";
 import { FormPart } from "@/components/forms/form-part";
 import { TextField } from "@/components/forms/text-field";
 import {
@@ -11,12 +12,12 @@ import {
   readingFormats,
   restAfter,
   supportInWords,
-  supportLevels,
   transfers,
   travelTools,
   whoSees,
   type AccessProfile,
 } from "@/lib/families/access-profile";
+import { supportLevels } from "@/lib/cover/support-level";
 
 /** The questions about a child, in the wording and grouping families see everywhere. */
 export function ProfileFields({ nameUsed, profile }: { nameUsed: string; profile: AccessProfile | null }) {

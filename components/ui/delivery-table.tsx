@@ -1,5 +1,6 @@
 import { DataTable } from "@/components/ui/data-table";
 import { messageKindInWords, type DeliveryView } from "@/lib/messages/message";
+import { counted } from "@/lib/shared/words";
 import { momentInWords } from "@/lib/shared/dates";
 
 const states = { queued: "waiting to be sent", sending: "being sent", sent: "sent", failed: "given up", cancelled: "cancelled" };
@@ -34,7 +35,7 @@ function State({ delivery }: { delivery: DeliveryView }) {
   return (
     <>
       <strong>{states[delivery.state]}</strong>
-      {delivery.lastProblem && <span className="block">Tried {delivery.attempts} times. {delivery.lastProblem}</span>}
+      {delivery.lastProblem && <span className="block">Tried {counted(delivery.attempts, "time", "times")}. {delivery.lastProblem}</span>}
     </>
   );
 }

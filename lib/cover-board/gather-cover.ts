@@ -1,4 +1,4 @@
-import { knex, type Connection } from "@/db/connection";
+import type { Connection } from "@/db/connection";
 import type { CoverAdult, CoverInput, CoverPerson } from "@/lib/cover/cover";
 import { coverPolicySchema, type CoverPolicy } from "@/lib/cover/cover-policy";
 import { guideNeedOf, type AccessProfile } from "@/lib/families/access-profile";
@@ -11,6 +11,7 @@ import { findPolicy } from "@/lib/outings/outing-store";
 import { findPerson } from "@/lib/people/person-store";
 import { listRegistrationsOf, type Registration } from "@/lib/registrations/registration-store";
 import { ageOn } from "@/lib/shared/dates";
+import { listPairings } from "./pairing-store";
 
 export type Coming = { registration: Registration; profile: AccessProfile };
 export type GatheredCover = { input: CoverInput; coming: Coming[]; answers: HelperAnswer[] };
@@ -103,15 +104,4 @@ function capabilitiesOf(record: HelperRecord | null): CoverAdult["capabilities"]
     firstAid: record?.firstAid ?? false,
     drive: record?.drives ?? false,
   };
-}
-
-export function listPairings(conn: Connection, outingId: string) {
-  return conn.all(
-    knex("pairings as p").join("registrations as r", "r.id", "p.registration_id").where("r.outing_id", outingId).select("p.registration_id", "p.person_id"),
-  );
-}
-
-export function setPairing(conn: Connection, registrationId: string, personId: string | null): void {
-  conn.run(knex("pairings").where({ registration_id: registrationId }).del());
-  if (personId !== null) conn.run(knex("pairings").insert({ registration_id: registrationId, person_id: personId }));
 }

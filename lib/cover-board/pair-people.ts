@@ -4,7 +4,8 @@ import { findOuting } from "@/lib/outings/outing-store";
 import { isStaff } from "@/lib/shared/actor";
 import { invalid, ok } from "@/lib/shared/outcome";
 import { defineCommand } from "@/lib/shared/use-case";
-import { gatherCover, setPairing } from "./gather-cover";
+import { gatherCover } from "./gather-cover";
+import { setPairing } from "./pairing-store";
 
 const pairSchema = z.object({
   slug: z.string().min(1).max(80),

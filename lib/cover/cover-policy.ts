@@ -1,11 +1,10 @@
 import { z } from "zod";
+import type { SupportLevel } from "./support-level";
 
 /** What a figure rests on when nobody could point to a page for it. Shown as it stands. */
 export const FROM_MEMORY = "from memory";
 export const COMMON_PRACTICE = "common practice, no published source";
 
-export const supportLevels = ["constant", "close", "occasional", "minimal"] as const;
-export type SupportLevel = (typeof supportLevels)[number];
 
 const source = z.string().trim().min(1, "Say where the figure comes from, or write “from memory”.");
 const participantsPerAdult = z

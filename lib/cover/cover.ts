@@ -1,4 +1,5 @@
-import type { CoverPolicy, SupportLevel } from "./cover-policy";
+import type { CoverPolicy } from "./cover-policy";
+import type { SupportLevel } from "./support-level";
 
 /** Shown wherever a verdict on cover is shown. */
 export const COVER_CAUTION =

@@ -1,8 +1,9 @@
 import type { Connection } from "@/db/connection";
 import { gatherCover } from "@/lib/cover-board/gather-cover";
 import { checkCover } from "@/lib/cover/check-cover";
-import { listDeliveries } from "@/lib/messages/message-store";
+import { listStatesByKey } from "@/lib/messages/message-store";
 import type { Outing } from "@/lib/outings/outing";
+import { meetingPointKey } from "@/lib/outings/outing-facts";
 import { slugSchema } from "@/lib/outings/outing-schema";
 import { findOuting } from "@/lib/outings/outing-store";
 import { outingView } from "@/lib/outings/outing-view";
@@ -46,7 +47,7 @@ export function readinessFacts(conn: Connection, outing: Outing, now: string): R
       leaders: coming.filter((one) => one.task === "leader").length,
     },
     roster: rosterState(conn, outing, now),
-    meetingPointMails: mailCounts(conn, outing, coming.map((one) => one.email)),
+    meetingPointMails: mailCounts(conn, outing, coming.map((one) => one.personId)),
   };
 }
 
@@ -56,9 +57,8 @@ function rosterState(conn: Connection, outing: Outing, now: string): ReadinessFa
   return newest.factsSha256 === rosterHash(gatherRoster(conn, outing, now)) ? "current" : "outdated";
 }
 
-function mailCounts(conn: Connection, outing: Outing, addresses: string[]): ReadinessFacts["meetingPointMails"] {
-  const mails = listDeliveries(conn, { outingId: outing.id }).filter((mail) => mail.kind === "meeting-point" && addresses.includes(mail.toAddress));
-  const reached = new Set(mails.filter((mail) => mail.state === "sent").map((mail) => mail.toAddress));
-  const unsent = new Set(mails.filter((mail) => mail.state !== "sent" && mail.state !== "cancelled").map((mail) => mail.toAddress));
-  return { wanted: addresses.length, sent: reached.size, unsent: [...unsent].filter((address) => !reached.has(address)).length };
+function mailCounts(conn: Connection, outing: Outing, personIds: string[]): ReadinessFacts["meetingPointMails"] {
+  const states = listStatesByKey(conn, personIds.map((id) => meetingPointKey(outing, id)));
+  const sent = states.filter((state) => state === "sent").length;
+  return { wanted: personIds.length, sent, unsent: states.length - sent };
 }

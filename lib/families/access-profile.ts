@@ -1,3 +1,5 @@
+import type { SupportLevel } from "@/lib/cover/support-level";
+
 /** What a family tells once about a child. Words are the trade's; each list's order is the order on the form. */
 
 export const travelTools = ["walks", "long cane", "dog guide", "walker", "wheelchair"] as const;
@@ -7,7 +9,6 @@ export const restAfter = ["10", "20", "40", "60", "not sure"] as const;
 export const guideTimes = ["all the time", "uneven ground", "crowds", "roads", "new places", "only if I ask", "not needed", "not sure"] as const;
 export const guideSides = ["left", "right", "either"] as const;
 export const guideHolds = ["above the elbow", "wrist", "shoulder", "hand", "spoken directions only"] as const;
-export const supportLevels = ["constant", "close", "occasional", "minimal"] as const;
 export const readingFormats = [
   "uncontracted braille",
   "contracted braille",
@@ -17,8 +18,6 @@ export const readingFormats = [
   "by phone",
   "none yet",
 ] as const;
-
-export type SupportLevel = (typeof supportLevels)[number];
 
 export const supportInWords: Record<SupportLevel, string> = {
   constant: "Somebody with them all the time (one adult for one child)",
@@ -59,14 +58,14 @@ export function guideNeedOf(profile: AccessProfile): GuideNeed {
 
 /** Who reads each part of the answers; stands beside the question. */
 export const whoSees = {
-  name: "the coordinator, the leader, chaperones and drivers of the day",
-  legal: "the coordinator and the person with the emergency file",
-  travel: "the coordinator, the leader, the guide and the driver",
-  guide: "the coordinator, the leader and the guide",
-  support: "the coordinator and the leader",
-  reading: "the coordinator, the leader and the guide",
+  name: "the coordinator, the leader and the adults of the day",
+  legal: "the coordinator",
+  travel: "the coordinator, and the leader as a short note",
+  guide: "the coordinator, and the leader as a short note",
+  support: "the coordinator, and the leader as a short note",
+  reading: "the coordinator",
   leaderNote: "the coordinator, and in these words on the leader's roster",
-  media: "the coordinator; leaders see only yes or no",
-  contacts: "the coordinator, the leader and the person with the emergency file",
-  pickUp: "the coordinator; leaders see the names only",
+  media: "the coordinator; the leader sees only no photo, no voice",
+  contacts: "the coordinator and the leader of the day",
+  pickUp: "the coordinator and the leader of the day",
 } as const;

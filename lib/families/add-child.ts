@@ -1,5 +1,6 @@
-import { ageOn } from "@/lib/shared/dates";
+import { ageOn, dayOf } from "@/lib/shared/dates";
 import { isSignedIn, personIdOf } from "@/lib/shared/actor";
+import { env } from "@/lib/shared/env";
 import { conflict, forbidden, invalid, ok } from "@/lib/shared/outcome";
 import { defineCommand } from "@/lib/shared/use-case";
 import { mayKeepFamily } from "./family-policy";
@@ -19,7 +20,7 @@ export const addChild = defineCommand({
   run: ({ conn, now, actor, input, found: { before, householdId, children } }) => {
     if (!isSignedIn(actor)) return forbidden();
     if (before) return ok({ participantId: before.id });
-    const age = ageOn(input.birthDate, now.slice(0, 10));
+    const age = ageOn(input.birthDate, dayOf(now, env().PROGRAMME_ZONE));
     if (age < 0) return invalid({ birthDate: "This date is still to come. Enter the date of birth." });
     if (age > 25) return invalid({ birthDate: "Our outings are for children and teenagers. Check the year of birth." });
     const twin = children.find((child) => child.birthDate === input.birthDate && child.legalName === input.legalName);

@@ -1,12 +1,8 @@
-import { hasRole, isStaff, type Actor } from "@/lib/shared/actor";
+import { hasRole, type Actor } from "@/lib/shared/actor";
 import type { Participant } from "./participant";
 
 export function mayKeepFamily(actor: Actor): boolean {
   return hasRole(actor, "guardian");
-}
-
-export function maySeeParticipant(actor: Actor, participant: Participant): boolean {
-  return isStaff(actor) || (hasRole(actor, "guardian") && participant.guardianIds.includes(actor.personId));
 }
 
 export function mayChangeProfile(actor: Actor, participant: Participant): boolean {

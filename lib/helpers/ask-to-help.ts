@@ -5,11 +5,15 @@ import { makeMailLink } from "@/lib/people/mail-link-store";
 import { findPerson } from "@/lib/people/person-store";
 import { isSignedIn } from "@/lib/shared/actor";
 import { publicAddress } from "@/lib/shared/addresses";
+import { minutesLater } from "@/lib/shared/dates";
 import { conflict, invalid, ok } from "@/lib/shared/outcome";
 import { defineCommand } from "@/lib/shared/use-case";
 import { mayAskHelpers } from "./helper-policy";
 import { askToHelpSchema } from "./helper-schema";
 import { insertAnswer } from "./helper-store";
+
+/** Long enough for an outing that is put off; whether an answer is still wanted is judged by the outing itself. */
+const answerLinkDays = 180;
 
 /** Asks chaperones or a leader to an outing by mail, with a link that answers without signing in. */
 export const askToHelp = defineCommand({
@@ -30,7 +34,7 @@ export const askToHelp = defineCommand({
       }
       const answer = insertAnswer(conn, now, { outingId: outing.id, personId: person.id, task: input.task });
       if (!answer.isNew) continue;
-      const secret = makeMailLink(conn, { purpose: "answer", personId: person.id, aboutId: answer.id, madeAt: now, expiresAt: outing.endsAt });
+      const secret = makeMailLink(conn, { purpose: "answer", personId: person.id, aboutId: answer.id, madeAt: now, expiresAt: minutesLater(outing.endsAt, answerLinkDays * 24 * 60) });
       queueMessage(conn, now, {
         kind: "asked-to-help",
         facts: {

@@ -1,5 +1,5 @@
 import { findOuting } from "@/lib/outings/outing-store";
-import { publicOutingFacts } from "@/lib/outings/outing-facts";
+import { meetingPointKey, publicOutingFacts } from "@/lib/outings/outing-facts";
 import { slugSchema } from "@/lib/outings/outing-schema";
 import { calendarOf } from "@/lib/outings/show-outing-calendar";
 import { queueMessage } from "@/lib/messages/message-store";
@@ -11,7 +11,7 @@ import { listAnswersOf } from "./helper-store";
 
 /**
  * Mails the meeting-point instructions to every adult who said yes, one address a mail.
- * The same edition of an outing goes to a person once, however often the button is pressed.
+ * The same text goes to a person once, however often the button is pressed.
  */
 export const sendMeetingPoint = defineCommand({
   input: slugSchema,
@@ -31,7 +31,7 @@ export const sendMeetingPoint = defineCommand({
         toAddress: one.email,
         toPersonId: one.personId,
         outingId: outing.id,
-        onceKey: `meeting-point ${outing.id} ${outing.edition} ${one.personId}`,
+        onceKey: meetingPointKey(outing, one.personId),
       });
     }
     return ok({ people: coming.length });

@@ -29,8 +29,14 @@ async function deliverOne(conn: Connection, mailer: Mailer, due: DueMessage): Pr
     return true;
   } catch (error) {
     const problem = error instanceof Error ? error.message : String(error);
-    log.warn({ messageId: due.id, attempts: due.attempts, problem }, "a mail could not be sent");
+    log.warn({ messageId: due.id, attempts: due.attempts, code: codeOf(error) }, "a mail could not be sent");
     noteProblem(conn, due, problem, mailer.clock());
     return false;
   }
+}
+
+/** What a mail server says often quotes an address, which has no place in a log. */
+function codeOf(error: unknown): string {
+  const code = typeof error === "object" && error !== null && "code" in error ? error.code : undefined;
+  return typeof code === "string" ? code : "unknown";
 }

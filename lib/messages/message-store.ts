@@ -117,7 +117,7 @@ export function listDeliveries(conn: Connection, filter: { outingId?: string; un
 
 export function countUnsent(conn: Connection): { waiting: number; failed: number } {
   const rows = conn.all(
-    knex("messages").whereIn("state", ["queued", "sending", "failed"]).where("attempts", ">", 0).select("state").count({ n: "*" }).groupBy("state"),
+    knex("messages").whereIn("state", ["queued", "failed"]).where("attempts", ">", 0).select("state").count({ n: "*" }).groupBy("state"),
   );
   const failed = Number(rows.find((row) => row.state === "failed")?.n ?? 0);
   return { failed, waiting: rows.reduce((sum, row) => sum + Number(row.n), 0) - failed };
@@ -132,4 +132,9 @@ export function retryMessages(conn: Connection, now: string): number {
       })
       .update({ state: "queued", attempts: 0, next_attempt_at: now }),
   ).changes;
+}
+
+/** How far the messages with these keys have come; a key nobody queued yet has none. */
+export function listStatesByKey(conn: Connection, keys: string[]): DeliveryView["state"][] {
+  return conn.all(knex("messages").whereIn("once_key", keys).select("state")).map((row) => row.state);
 }

@@ -19,7 +19,8 @@ export type MessageFacts = {
   "seat-offered": { name: string; outing: OutingFacts; registrationId: string; until: string };
   "asked-to-help": { name: string; outing: OutingFacts; task: string; from: string; link: string };
   "meeting-point": { name: string; outing: OutingFacts; task: string; phone: string; calendar: string };
-  "called-off": { name: string; outing: OutingFacts; because: string };
+  "called-off": { name: string; outing: OutingFacts; because: string; calendar: string };
+  "outing-changed": { name: string; outing: OutingFacts; calendar: string };
 };
 
 export type MessageKind = keyof MessageFacts;
@@ -47,6 +48,7 @@ export const messageKindInWords: Record<MessageKind, string> = {
   "asked-to-help": "Asked to help",
   "meeting-point": "Meeting-point instructions",
   "called-off": "Outing called off",
+  "outing-changed": "Outing changed",
 };
 
 /** A link's secret has no business in the log of what was sent. */

@@ -35,7 +35,7 @@ const outingFields = {
   seats: whole("the number of seats", 1, 60),
   youngestAge: whole("the youngest age", 3, 21),
   oldestAge: whole("the oldest age", 3, 21),
-  suggestedFee: amountTyped,
+  suggestedFee: amountTyped.refine((cents) => cents === 0 || cents >= 50, "Enter 0, or 0.50 dollars or more: a card payment cannot be smaller."),
   policyId: z.string().min(1, "Choose a policy."),
   meetingText: line("the meeting-point instructions", 6000),
   modelIds: listOf(z.string().max(60)),

@@ -1,4 +1,4 @@
-import ical, { ICalEventStatus } from "ical-generator";
+import ical, { ICalCalendarMethod, ICalEventStatus } from "ical-generator";
 import { publicAddress } from "@/lib/shared/addresses";
 import { ok } from "@/lib/shared/outcome";
 import { defineQuery } from "@/lib/shared/use-case";
@@ -23,6 +23,8 @@ export const showOutingCalendar = defineQuery({
  */
 export function calendarOf(outing: Outing, now: string, description = outing.meetingText): string {
   const calendar = ical({ prodId: { company: "Dunlin", product: "Outings", language: "EN" } });
+  const isOff = outing.state === "called off";
+  calendar.method(isOff ? ICalCalendarMethod.CANCEL : ICalCalendarMethod.PUBLISH);
   calendar.createEvent({
     id: `${outing.id}@dunlin`,
     sequence: outing.edition,
@@ -33,7 +35,7 @@ export function calendarOf(outing: Outing, now: string, description = outing.mee
     location: outing.site.name,
     description,
     url: publicAddress(`/outings/${outing.slug}`),
-    status: outing.state === "called off" ? ICalEventStatus.CANCELLED : ICalEventStatus.CONFIRMED,
+    status: isOff ? ICalEventStatus.CANCELLED : ICalEventStatus.CONFIRMED,
   });
   return `${calendar.toString()}\r\n`;
 }

@@ -2,7 +2,7 @@ import { checkoutMinutes } from "@/lib/registrations/registration";
 import { mayChangeRegistration } from "@/lib/registrations/registration-policy";
 import { findOwnRegistration, type Registration } from "@/lib/registrations/registration-store";
 import { extendHold } from "@/lib/registrations/seat-store";
-import { confirmIfComplete } from "@/lib/registrations/settle-seats";
+import { broughtUpToNow, confirmIfComplete } from "@/lib/registrations/settle-seats";
 import type { Connection } from "@/db/connection";
 import { personIdOf } from "@/lib/shared/actor";
 import { minutesLater } from "@/lib/shared/dates";
@@ -32,7 +32,8 @@ export const chooseFee = defineCommand({
   input: chooseFeeSchema,
   load: (conn, actor, input, now) => findOwnRegistration(conn, personIdOf(actor) ?? "", input.registrationId, now),
   allow: (actor, registration) => mayChangeRegistration(actor, registration),
-  run: ({ conn, now, found: registration, input }) => {
+  run: ({ conn, now, found, input }) => {
+    const registration = broughtUpToNow(conn, now, found);
     if (registration.feeSettled) return ok<FeeAnswer>({ kind: "settled", registrationId: registration.id });
     if (registration.state !== "held") {
       return conflict("not-held", "No seat is held for this registration now. Go back to the outing's page to register again.");
@@ -65,6 +66,6 @@ export const chooseFee = defineCommand({
 /** The payment page closes before the seat is given up, so that nobody pays for a seat they have lost. */
 function holdWhilePaying(conn: Connection, now: string, registration: Registration): string {
   const expiresAt = minutesLater(now, checkoutMinutes);
-  extendHold(conn, now, registration.id, minutesLater(expiresAt, 5));
+  extendHold(conn, now, registration.id, minutesLater(expiresAt, 5), registration.outing.startsAt);
   return expiresAt;
 }

@@ -69,7 +69,7 @@ export function noteEvent(conn: Connection, now: string, event: { id: string; ty
   return changes === 1;
 }
 
-export type MoneyToReturn = { paymentId: string; nameUsed: string; amountCents: number; currency: string; why: "withdrawn" | "paid twice" | "called off" };
+export type MoneyToReturn = { paymentId: string; nameUsed: string; amountCents: number; currency: string; why: "withdrawn" | "called off" | "paid without need" };
 
 /** Paid, and nothing for it: a withdrawn seat, an outing called off, or the second of two payments. */
 export function listMoneyToReturn(conn: Connection): MoneyToReturn[] {
@@ -80,17 +80,23 @@ export function listMoneyToReturn(conn: Connection): MoneyToReturn[] {
       .join("outings as o", "o.id", "r.outing_id")
       .where({ "p.kind": "checkout" })
       .whereNotNull("p.settled_at")
+      .whereIn("p.state", ["settled", "abandoned"])
       .where((either) => {
         either.where("p.state", "abandoned").orWhereIn("r.state", ["withdrawn", "turned away"]).orWhere("o.state", "called off");
       })
       .orderBy("p.settled_at")
-      .select("p.id", "c.name_used", "p.amount_cents", "p.currency", "r.state"),
+      .select("p.id", "c.name_used", "p.amount_cents", "p.currency", "p.state as payment", "o.state as outing"),
   );
   return rows.map((row) => ({
     paymentId: row.id,
     nameUsed: row.name_used,
     amountCents: row.amount_cents,
     currency: row.currency,
-    why: row.state === "withdrawn" || row.state === "turned away" ? "withdrawn" : "paid twice",
+    why: row.payment === "abandoned" ? "paid without need" : row.outing === "called off" ? "called off" : "withdrawn",
   }));
+}
+
+/** The money was given back at the payment service: the payment no longer buys a seat. */
+export function notePaymentReturned(conn: Connection, paymentId: string): void {
+  conn.run(knex("payments").where({ id: paymentId }).whereNotNull("settled_at").update({ state: "returned" }));
 }

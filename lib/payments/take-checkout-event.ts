@@ -25,6 +25,7 @@ export const takeCheckoutEvent = defineCommand({
     if (payment.state === "settled") return ok<EventAnswer>("seen before");
     if (payment.amount_cents !== input.amountCents || payment.currency !== input.currency) {
       log.error({ paymentId: payment.id, told: input.amountCents, asked: payment.amount_cents }, "a payment came with another amount");
+      noteExtraPayment(conn, now, payment.id, input.paymentIntentId);
       return ok<EventAnswer>("other amount");
     }
     if (hasSettledPayment(conn, payment.registration_id)) {

@@ -14,6 +14,8 @@ export function createLucia(conn: Connection, secureCookie: boolean) {
     sessionExpiresIn: new TimeSpan(30, "d"),
     sessionCookie: {
       name: "dunlin_session",
+      // The cookie outlives the session; the session itself lapses 30 days after it was last used.
+      expires: false,
       attributes: { secure: secureCookie, sameSite: "lax", path: "/" },
     },
   });

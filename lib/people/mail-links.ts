@@ -2,15 +2,18 @@ import type { Connection } from "@/db/connection";
 import { queueMessage } from "@/lib/messages/message-store";
 import { publicAddress } from "@/lib/shared/addresses";
 import { minutesLater } from "@/lib/shared/dates";
-import { makeMailLink } from "./mail-link-store";
+import { makeMailLink, spendOlderLinks, type Carried } from "./mail-link-store";
 import { linkLifeMinutes, type Person } from "./person";
 
-/** Mails somebody the link that proves the address is theirs. */
-export function mailConfirmation(conn: Connection, now: string, person: Pick<Person, "id" | "name" | "email">): void {
-  const link = freshLink(conn, now, "confirm-email", person.id);
+/**
+ * Mails the link that proves an address, and carries what was typed with it. The password takes effect only when
+ * this very link is followed, so nobody can put a password on an address that is not theirs.
+ */
+export function mailConfirmation(conn: Connection, now: string, person: Pick<Person, "id" | "email">, carries: Carried): void {
+  const link = freshLink(conn, now, "confirm-email", person.id, carries);
   queueMessage(conn, now, {
     kind: "confirm-email",
-    facts: { name: person.name, link },
+    facts: { name: carries.name, link },
     toAddress: person.email,
     toPersonId: person.id,
   });
@@ -27,6 +30,7 @@ export function mailInvitation(
   invitation: { person: Pick<Person, "id" | "name" | "email">; role: string; from: string },
 ): void {
   const { person, role, from } = invitation;
+  spendOlderLinks(conn, person.id, "invitation", now);
   const link = freshLink(conn, now, "invitation", person.id);
   queueMessage(conn, now, {
     kind: "invitation",
@@ -36,7 +40,7 @@ export function mailInvitation(
   });
 }
 
-function freshLink(conn: Connection, now: string, purpose: keyof typeof linkLifeMinutes, personId: string): string {
-  const secret = makeMailLink(conn, { purpose, personId, madeAt: now, expiresAt: minutesLater(now, linkLifeMinutes[purpose]) });
+function freshLink(conn: Connection, now: string, purpose: keyof typeof linkLifeMinutes, personId: string, carries?: Carried): string {
+  const secret = makeMailLink(conn, { purpose, personId, ...(carries ? { carries } : {}), madeAt: now, expiresAt: minutesLater(now, linkLifeMinutes[purpose]) });
   return publicAddress(`/link/${secret}`);
 }

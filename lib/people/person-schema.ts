@@ -31,6 +31,8 @@ export const signUpSchema = z.object({
   email: emailField,
   phone: optionalPhoneField,
   password: passwordField,
+  /** Where the sign-up began, to go on there. */
+  back: z.string().max(300).default(""),
 });
 
 export const signInSchema = z.object({

@@ -79,6 +79,14 @@ export function giveRole(conn: Connection, personId: string, role: Role): void {
   conn.run(knex("person_roles").insert({ person_id: personId, role }).onConflict(["person_id", "role"]).ignore());
 }
 
+export function takeRole(conn: Connection, personId: string, role: Role): void {
+  conn.run(knex("person_roles").where({ person_id: personId, role }).del());
+}
+
+export function endSessionsOf(conn: Connection, personId: string): void {
+  conn.run(knex("sessions").where({ user_id: personId }).del());
+}
+
 export function confirmEmail(conn: Connection, personId: string, now: string): void {
   conn.run(knex("people").where({ id: personId }).whereNull("email_confirmed_at").update({ email_confirmed_at: now }));
 }
@@ -104,6 +112,10 @@ export function noteSignInAttempt(conn: Connection, email: string, now: string):
 export function countSignInAttempts(conn: Connection, email: string, since: string): number {
   const row = conn.first(knex("sign_in_attempts").where({ email }).where("at", ">", since).count({ n: "*" }));
   return Number(row?.n ?? 0);
+}
+
+export function forgetOldSignInAttempts(conn: Connection, before: string): void {
+  conn.run(knex("sign_in_attempts").where("at", "<", before).del());
 }
 
 export function forgetSignInAttempts(conn: Connection, email: string): void {

@@ -34,5 +34,8 @@ export const linkLifeMinutes = {
   invitation: 14 * 24 * 60,
 } as const;
 
+/** Nobody is sent more links than this in an hour, whoever asks for them. */
+export const mailsAnHour = 5;
+
 /** Ten wrong answers in a quarter of an hour close the door for that address until the quarter is over. */
 export const attemptsAllowed = { count: 10, minutes: 15 } as const;

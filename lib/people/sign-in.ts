@@ -1,7 +1,6 @@
 import { minutesLater } from "@/lib/shared/dates";
 import { ok } from "@/lib/shared/outcome";
 import { defineCommand } from "@/lib/shared/use-case";
-import { mailConfirmation } from "./mail-links";
 import { isPassword } from "./passwords";
 import { attemptsAllowed } from "./person";
 import { signInSchema } from "./person-schema";
@@ -16,8 +15,7 @@ import {
 export type SignInAnswer =
   | { kind: "signed-in"; personId: string }
   | { kind: "wrong" }
-  | { kind: "too-many" }
-  | { kind: "unconfirmed" };
+  | { kind: "too-many" };
 
 /** Every answer is an ok outcome, since even a wrong attempt has something to keep: that it was made. */
 export const signIn = defineCommand({
@@ -33,10 +31,6 @@ export const signIn = defineCommand({
     if (!person || !isRight) {
       noteSignInAttempt(conn, input.email, now);
       return ok<SignInAnswer>({ kind: "wrong" });
-    }
-    if (!person.emailConfirmed) {
-      mailConfirmation(conn, now, person);
-      return ok<SignInAnswer>({ kind: "unconfirmed" });
     }
     forgetSignInAttempts(conn, input.email);
     return ok<SignInAnswer>({ kind: "signed-in", personId: person.id });

@@ -1,3 +1,5 @@
+import { counted } from "@/lib/shared/words";
+
 /** What an outing needs before it may go. Each item is ready, waiting on others, needs you, or stops the outing. */
 export type ReadinessState = "ready" | "waiting on others" | "needs you" | "stops the outing";
 
@@ -32,7 +34,8 @@ export function verdictOf(items: ReadinessItem[]): { kind: "good" | "you" | "sto
   if (stops + needs + waits === 0) return { kind: "good", sentence: "Ready: nothing is missing." };
   const parts: string[] = [];
   if (needs > 0) parts.push(needs === 1 ? "one thing needs you" : `${inWords(needs)} things need you`);
-  if (stops > 0) parts.push(stops === 1 ? "one stops the outing" : `${inWords(stops)} stop the outing`);
+  const thing = parts.length === 0 ? (stops === 1 ? " thing" : " things") : "";
+  if (stops > 0) parts.push(stops === 1 ? `one${thing} stops the outing` : `${inWords(stops)}${thing} stop the outing`);
   if (parts.length === 0) parts.push(waits === 1 ? "one thing waits on others" : `${inWords(waits)} things wait on others`);
   return { kind: stops > 0 ? "stop" : "you", sentence: `Not yet ready: ${parts.join(", ")}.` };
 }
@@ -60,7 +63,7 @@ function people({ confirmed, held, waiting }: ReadinessFacts): ReadinessItem {
 
 function adults({ helpers }: ReadinessFacts): ReadinessItem {
   const act = { path: "helpers", text: "Ask people" } as const;
-  if (helpers.leaders === 0) return { name: "Adults", state: "needs you", sentence: `No leader has said yes. ${helpers.yes} adults have.`, act };
+  if (helpers.leaders === 0) return { name: "Adults", state: "needs you", sentence: `No leader has said yes. ${counted(helpers.yes, "adult has", "adults have")}.`, act };
   const open = helpers.maybe + helpers.asked;
   if (open > 0) {
     return { name: "Adults", state: "waiting on others", sentence: `${helpers.yes} said yes; ${helpers.asked} have not answered and ${helpers.maybe} said maybe.`, act };
@@ -79,7 +82,7 @@ function meetingPoint({ meetingPointMails: { wanted, sent, unsent } }: Readiness
   if (wanted === 0) return { name: "Meeting-point mails", state: "waiting on others", sentence: "Sent once somebody has said yes.", act: null };
   if (unsent > 0) return { name: "Meeting-point mails", state: "needs you", sentence: `${unsent} of ${wanted} have not gone out yet.`, act };
   if (sent < wanted) return { name: "Meeting-point mails", state: "needs you", sentence: `${wanted - sent} of ${wanted} adults have not been told where to meet.`, act };
-  return { name: "Meeting-point mails", state: "ready", sentence: `All ${wanted} adults have them.`, act };
+  return { name: "Meeting-point mails", state: "ready", sentence: wanted === 1 ? "The one adult who comes has it." : `All ${wanted} adults have them.`, act };
 }
 
 function roster({ roster: state, confirmed }: ReadinessFacts): ReadinessItem {

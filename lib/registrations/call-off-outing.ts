@@ -1,15 +1,12 @@
-import { listAnswersOf } from "@/lib/helpers/helper-store";
 import { queueMessage } from "@/lib/messages/message-store";
 import { publicOutingFacts } from "@/lib/outings/outing-facts";
-import type { Outing } from "@/lib/outings/outing";
 import { mayPlanOutings } from "@/lib/outings/outing-policy";
 import { callOffSchema } from "@/lib/outings/outing-schema";
 import { findOuting, setOutingState } from "@/lib/outings/outing-store";
-import { findPerson } from "@/lib/people/person-store";
-import type { Connection } from "@/db/connection";
+import { calendarOf } from "@/lib/outings/show-outing-calendar";
 import { conflict, ok } from "@/lib/shared/outcome";
 import { defineCommand } from "@/lib/shared/use-case";
-import { listRegistrationsOf } from "./registration-store";
+import { addresseesOf } from "./addressees";
 
 /** Calls the day off and tells every family and helper, each in a mail of their own. */
 export const callOffOuting = defineCommand({
@@ -22,10 +19,11 @@ export const callOffOuting = defineCommand({
     const wasPublic = outing.state !== "draft";
     setOutingState(conn, now, outing.id, "called off", input.because);
     const addressees = wasPublic ? addresseesOf(conn, now, outing) : [];
+    const calendar = calendarOf({ ...outing, state: "called off", edition: outing.edition + 1 }, now);
     for (const person of addressees) {
       queueMessage(conn, now, {
         kind: "called-off",
-        facts: { name: person.name, outing: publicOutingFacts(outing), because: input.because },
+        facts: { name: person.name, outing: publicOutingFacts(outing), because: input.because, calendar },
         toAddress: person.email,
         toPersonId: person.id,
         outingId: outing.id,
@@ -34,9 +32,3 @@ export const callOffOuting = defineCommand({
     return ok({ title: outing.title, told: addressees.length });
   },
 });
-
-function addresseesOf(conn: Connection, now: string, outing: Outing) {
-  const families = listRegistrationsOf(conn, outing.id, ["confirmed", "held", "waiting"], now).map((one) => one.registeredBy);
-  const helpers = listAnswersOf(conn, outing.id).filter((one) => one.state !== "no").map((one) => one.personId);
-  return [...new Set([...families, ...helpers])].flatMap((id) => findPerson(conn, id) ?? []);
-}

@@ -48,7 +48,7 @@ export const registerChild = defineCommand({
 function seatOrQueue(conn: Connection, now: string, given: { id: string; outing: Outing; actor: SignedIn }): "held" | "waiting" | "confirmed" {
   const { id, outing, actor } = given;
   const nobodyWaits = firstInQueue(conn, outing.id) === null;
-  if (nobodyWaits && holdSeat(conn, now, outing.id, id, minutesLater(now, holdMinutes))) {
+  if (nobodyWaits && holdSeat(conn, now, outing.id, id, holdEnd(now, outing))) {
     return confirmIfComplete(conn, now, id) ? "confirmed" : "held";
   }
   joinQueue(conn, now, id);
@@ -65,6 +65,11 @@ function seatOrQueue(conn: Connection, now: string, given: { id: string; outing:
     outingId: outing.id,
   });
   return "waiting";
+}
+
+function holdEnd(now: string, outing: Outing): string {
+  const end = minutesLater(now, holdMinutes);
+  return end < outing.startsAt ? end : outing.startsAt;
 }
 
 function ageRefusal(outing: Outing, participant: Participant): string | null {

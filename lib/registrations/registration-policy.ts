@@ -8,10 +8,6 @@ export function mayRegister(actor: Actor, participant: Participant): boolean {
 
 type Facts = { participant: Participant };
 
-export function maySeeRegistration(actor: Actor, { participant }: Facts): boolean {
-  return isStaff(actor) || mayChangeProfile(actor, participant);
-}
-
 export function mayChangeRegistration(actor: Actor, { participant }: Facts): boolean {
   return mayChangeProfile(actor, participant);
 }

@@ -15,3 +15,6 @@ export const confirmNeedsSchema = registrationIdSchema
     thisTime: z.string().trim().max(1000, "Shorten this to 1,000 letters or fewer.").default(""),
   })
   .and(accessProfileSchema);
+
+/** Giving a seat away asks for a second look, since somebody else may get it at once. */
+export const withdrawSchema = registrationIdSchema.extend({ sure: z.literal("yes", "Tick the box to give the seat back.") });

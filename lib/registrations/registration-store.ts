@@ -4,7 +4,9 @@ import { findParticipant } from "@/lib/families/participant-store";
 import type { Participant } from "@/lib/families/participant";
 import type { Outing } from "@/lib/outings/outing";
 import { findOuting } from "@/lib/outings/outing-store";
+import { dayOf } from "@/lib/shared/dates";
 import { newId } from "@/lib/shared/ids";
+import { findWaiverInForce } from "@/lib/waivers/waiver-store";
 import type { GuardianPlan, RegistrationState } from "./registration";
 
 const columns = [
@@ -36,7 +38,7 @@ export type Payment = {
   kind: "checkout" | "no-fee";
   amountCents: number;
   currency: string;
-  state: "pending" | "settled" | "abandoned";
+  state: "pending" | "settled" | "abandoned" | "returned";
   checkoutUrl: string | null;
   checkoutSessionId: string | null;
   createdAt: string;
@@ -60,9 +62,7 @@ function registrationFrom(conn: Connection, row: RegistrationRow, now: string): 
   const participant = findParticipant(conn, row.participant_id);
   if (!outing || !participant) throw new Error(`registration ${row.id} has lost its outing or its child`);
   const seat = conn.first(knex("seats").where({ registration_id: row.id }).select("number"));
-  const signature = conn.first(
-    knex("signatures as s").join("waiver_texts as w", "w.id", "s.waiver_text_id").where("s.registration_id", row.id).select("s.typed_name", "s.signed_at", "w.version"),
-  );
+  const signature = countingSignature(conn, row, dayOf(now, outing.site.zone));
   const payment = livePayment(conn, row.id);
   return {
     id: row.id,
@@ -82,6 +82,19 @@ function registrationFrom(conn: Connection, row: RegistrationRow, now: string): 
     payment,
     feeSettled: payment?.state === "settled",
   };
+}
+
+/** The newest signature. Before the seat is confirmed it counts only if its text is still the one in force. */
+function countingSignature(conn: Connection, row: RegistrationRow, today: string) {
+  const newest = conn.first(
+    knex("signatures as s")
+      .join("waiver_texts as w", "w.id", "s.waiver_text_id")
+      .where("s.registration_id", row.id)
+      .orderBy("w.version", "desc")
+      .select("s.typed_name", "s.signed_at", "w.version"),
+  );
+  if (!newest || row.state === "confirmed") return newest;
+  return newest.version === findWaiverInForce(conn, today)?.version ? newest : undefined;
 }
 
 function placeInQueue(conn: Connection, row: RegistrationRow): number {
@@ -187,5 +200,18 @@ export function setNeeds(
       this_time: needs.thisTime,
       updated_at: now,
     }),
+  );
+}
+
+/** Outings to come are planned with the newest profile, where an earlier one had been given. */
+export function followProfile(conn: Connection, now: string, participantId: string, profileId: string): void {
+  const toCome = knex("outings").where("ends_at", ">", now).select("id");
+  conn.run(
+    knex("registrations")
+      .where({ participant_id: participantId })
+      .whereIn("state", ["held", "waiting", "confirmed"])
+      .whereIn("outing_id", toCome)
+      .whereNotNull("profile_id")
+      .update({ profile_id: profileId, updated_at: now }),
   );
 }

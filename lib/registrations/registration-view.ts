@@ -2,7 +2,7 @@ import { outingView, type OutingView } from "@/lib/outings/outing-view";
 import type { AccessProfile } from "@/lib/families/access-profile";
 import { momentInWords } from "@/lib/shared/dates";
 import { moneyInWords } from "@/lib/shared/money";
-import { stepsLeft, type GuardianPlan, type RegistrationState, type Step } from "./registration";
+import { isLive, stepsLeft, type GuardianPlan, type RegistrationState, type Step } from "./registration";
 import type { Registration } from "./registration-store";
 
 /** A registration as its family sees it. */
@@ -12,6 +12,10 @@ export type RegistrationView = {
   child: { id: string; nameUsed: string; profile: AccessProfile | null };
   state: RegistrationState;
   stateInWords: string;
+  /** Still to come and neither withdrawn nor called off: there is something to do or to wait for. */
+  isOn: boolean;
+  /** Where to meet, for those who come. */
+  meetingText: string | null;
   holdUntil: string | null;
   placeInQueue: number | null;
   seatNumber: number | null;
@@ -31,7 +35,9 @@ export function registrationView(registration: Registration, now: string): Regis
     outing: outingView(outing, now),
     child: { id: participant.id, nameUsed: participant.nameUsed, profile: participant.profile?.answers ?? null },
     state: registration.state,
-    stateInWords: stateInWords(registration, holdUntil),
+    stateInWords: stateInWords(registration, holdUntil, now),
+    isOn: isLive(registration.state) && outing.state !== "called off" && outing.endsAt > now,
+    meetingText: registration.state === "confirmed" ? outing.meetingText : null,
     holdUntil,
     placeInQueue: registration.placeInQueue,
     seatNumber: registration.seatNumber,
@@ -47,9 +53,13 @@ export function registrationView(registration: Registration, now: string): Regis
   };
 }
 
-function stateInWords(registration: Registration, holdUntil: string | null): string {
+function stateInWords(registration: Registration, holdUntil: string | null, now: string): string {
   const name = registration.participant.nameUsed;
-  switch (registration.state) {
+  const { outing, state } = registration;
+  const isLiveHere = state === "confirmed" || state === "held" || state === "waiting";
+  if (outing.state === "called off" && isLiveHere) return `This outing is called off. ${outing.calledOffBecause ?? ""}`.trim();
+  if (outing.endsAt <= now && isLiveHere) return state === "confirmed" ? `${name} was registered for this outing.` : "This outing is over.";
+  switch (state) {
     case "confirmed":
       return `${name} is coming. Count-off number ${registration.seatNumber ?? "to follow"}.`;
     case "held":

@@ -22,7 +22,9 @@ export function holdSeat(conn: Connection, now: string, outingId: string, regist
   return true;
 }
 
-export function extendHold(conn: Connection, now: string, registrationId: string, until: string): void {
+/** Never past the start of the outing. */
+export function extendHold(conn: Connection, now: string, registrationId: string, wished: string, startsAt: string): void {
+  const until = wished < startsAt ? wished : startsAt;
   conn.run(
     knex("registrations")
       .where({ id: registrationId, state: "held" })

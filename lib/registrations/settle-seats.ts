@@ -12,11 +12,17 @@ import { confirmSeat, firstInQueue, giveUpSeat, holdSeat, listLapsedHolds } from
 
 /**
  * Brings an outing's seats up to now: holds that ran out are given up, and whoever has waited longest is
- * offered what is free. Called at the start of every command that touches seats, and by the clock.
+ * offered what is free. Called before every decision about a seat, and by the clock.
  */
 export function settleSeats(conn: Connection, now: string, outing: Outing): void {
   for (const id of listLapsedHolds(conn, outing.id, now)) giveUpSeat(conn, now, id);
   if (takesRegistrations(outing, now)) offerFreeSeats(conn, now, outing);
+}
+
+/** A registration as it is once its outing's seats are brought up to now: a hold that ran out is none any more. */
+export function broughtUpToNow(conn: Connection, now: string, registration: Registration): Registration {
+  settleSeats(conn, now, registration.outing);
+  return findRegistration(conn, registration.id, now) ?? registration;
 }
 
 function offerFreeSeats(conn: Connection, now: string, outing: Outing): void {

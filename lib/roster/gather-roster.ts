@@ -6,6 +6,7 @@ import { guideNeedOf } from "@/lib/families/access-profile";
 import type { Outing } from "@/lib/outings/outing";
 import { dayInWords, hoursInWords, momentInWords } from "@/lib/shared/dates";
 import { env } from "@/lib/shared/env";
+import { mayBeOnPaper } from "./never-on-paper";
 import type { RosterAdult, RosterFacts, RosterPerson, TravelCode } from "./roster-facts";
 
 const countPoints = ["Arrive", "Leave", "Midway", "Back"];
@@ -47,7 +48,7 @@ function personFrom({ registration, profile }: Coming, adultId: string | null): 
   if (profile.chair === "pushed") notes.push("push the chair");
   if (profile.restAfter !== "not sure" && profile.restAfter !== "60") notes.push(`sit down every ${profile.restAfter} min`);
   if (profile.travel.includes("walker")) notes.push("uses a walker");
-  if (profile.leaderNote !== "") notes.push(profile.leaderNote.replace(/[.;]+$/, ""));
+  if (profile.leaderNote !== "") notes.push(noteForPaper(profile.leaderNote));
   return {
     number: registration.seatNumber,
     nameUsed: registration.participant.nameUsed,
@@ -61,6 +62,11 @@ function personFrom({ registration, profile }: Coming, adultId: string | null): 
     // Everybody is handed over against the list; the mark is for a hand-over that needs the base first.
     checkIdList: false,
   };
+}
+
+/** One family's wording never holds up everybody's roster: what may not be printed is asked about instead. */
+function noteForPaper(note: string): string {
+  return mayBeOnPaper(note) ? note.replace(/[.;]+$/, "") : "ask the coordinator";
 }
 
 /** Short, for a narrow column: when, the guide's arm, and the hold where it is not the common one above the elbow. */

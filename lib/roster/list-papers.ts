@@ -7,7 +7,7 @@ import { ok } from "@/lib/shared/outcome";
 import { defineQuery } from "@/lib/shared/use-case";
 import { gatherRoster } from "./gather-roster";
 import { listPapersOf, rosterHash } from "./paper-store";
-import { findRosterOuting } from "./print-roster";
+import { findRosterOuting } from "./roster-access";
 
 /** The papers of an outing, newest first, and whether the newest still says what is true. */
 export const listPapers = defineQuery({

@@ -154,6 +154,11 @@ function wholeWords(part: string): RegExp {
   return new RegExp(`(?<![\\p{L}\\p{N}])${literal}(?![\\p{L}\\p{N}])`, "gu");
 }
 
+/** Whether a note of a family's may stand on a roster, as far as a pattern can know. */
+export function mayBeOnPaper(note: string): boolean {
+  return neverOnPaper.every((rule) => rule.patterns.every((pattern) => !pattern.test(note)));
+}
+
 function findingsOf(rule: NeverOnPaper, text: string, where: string): NeverOnPaperFinding[] {
   for (const pattern of rule.patterns) {
     const found = pattern.exec(text)?.[0].trim();

@@ -5,7 +5,7 @@ import { isSignedIn } from "@/lib/shared/actor";
 import { forbidden, ok } from "@/lib/shared/outcome";
 import { defineCommand } from "@/lib/shared/use-case";
 import { findPaper, noteReading } from "./paper-store";
-import { findRosterOuting } from "./print-roster";
+import { findRosterOuting } from "./roster-access";
 
 /** Opens a printed paper. Every reading is noted, so this changes something and is a command. */
 export const openPaper = defineCommand({

@@ -1,15 +1,13 @@
 import { z } from "zod";
-import { listAnswersOf } from "@/lib/helpers/helper-store";
-import { findOuting } from "@/lib/outings/outing-store";
 import { maySeeRoster } from "@/lib/registrations/registration-policy";
-import { hasRole, isSignedIn, isStaff, type Actor } from "@/lib/shared/actor";
-import type { Connection } from "@/db/connection";
+import { isSignedIn } from "@/lib/shared/actor";
 import { conflict, forbidden, ok } from "@/lib/shared/outcome";
 import { defineCommand } from "@/lib/shared/use-case";
 import { gatherRoster } from "./gather-roster";
 import { checkNeverOnPaper } from "./never-on-paper";
 import { largeSizePt, largestSizePt, paperForms, standardSizePt } from "./paper";
 import { insertPaper, noteReading, rosterHash, versionOf } from "./paper-store";
+import { findRosterOuting } from "./roster-access";
 import { rosterSheet } from "./roster-sheet";
 
 const printRosterSchema = z
@@ -22,15 +20,6 @@ const printRosterSchema = z
     ...rest,
     textSizePt: rest.form === "standard" ? standardSizePt : Math.min(largestSizePt, Math.max(largeSizePt, textSizePt ?? largeSizePt)),
   }));
-
-/** Where a roster is asked for: staff, or a leader of this day until three days after it. */
-export function findRosterOuting(conn: Connection, actor: Actor, slug: string, now: string) {
-  const outing = findOuting(conn, { slug }, now);
-  if (!outing) return null;
-  const leaderIds = listAnswersOf(conn, outing.id).filter((one) => one.task === "leader" && one.state === "yes").map((one) => one.personId);
-  const inScope = isStaff(actor) || (hasRole(actor, "leader") && leaderIds.includes(actor.personId));
-  return inScope ? { outing, access: { leaderIds, endsAt: outing.endsAt, now } } : null;
-}
 
 /**
  * Makes the roster as a paper with a version. Nothing changed since the last print: the same version again.

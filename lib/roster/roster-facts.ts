@@ -1,7 +1,9 @@
 /** What a roster says, the same in every form. Nothing of `never-on-paper.ts` may be in it. */
 
+import { counted } from "@/lib/shared/words";
+import type { SupportLevel } from "@/lib/cover/support-level";
+
 export type TravelCode = "guide" | "cane" | "dog" | "wheels";
-export type SupportLevel = "constant" | "close" | "occasional" | "minimal";
 
 export type RosterPerson = {
   /** The count-off number, the same in every form; gaps are possible. */
@@ -88,10 +90,6 @@ export function totalsInWords(facts: RosterFacts): string {
   const gaps = missing.length === 0 ? "every number is taken" : `nobody has ${joinWords(missing.map(String))}`;
   const range = highest === 1 ? "Number 1" : `Numbers 1 to ${highest}`;
   return `${people} and ${adults}. ${range}; ${gaps}.`;
-}
-
-export function counted(count: number, one: string, many: string): string {
-  return `${count} ${count === 1 ? one : many}`;
 }
 
 /** "a", "a and b", "a, b and c". */

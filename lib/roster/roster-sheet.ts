@@ -1,5 +1,4 @@
 import {
-  counted,
   joinWords,
   sortPeople,
   totalsInWords,
@@ -9,6 +8,7 @@ import {
 import type { RosterAdult, RosterFacts, RosterPerson } from "@/lib/roster/roster-facts";
 import { heading, list, note, paragraph, strongParagraph } from "@/lib/sheets/sheet";
 import type { Block, Column, Entry, EntryLine, ListItem, Sheet, Table } from "@/lib/sheets/sheet";
+import { counted } from "@/lib/shared/words";
 
 /** `table`: one row a person, for a sighted leader. `blocks`: one block a person, for large print. */
 export type RosterForm = "table" | "blocks";

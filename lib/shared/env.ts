@@ -26,7 +26,7 @@ export type Env = z.infer<typeof schema>;
 export function readEnv(source: Record<string, string | undefined> = process.env): Env {
   const parsed = schema.safeParse(Object.fromEntries(Object.entries(source).filter(([, value]) => value !== "")));
   if (!parsed.success) throw new Error(`The configuration is not usable:\n${z.prettifyError(parsed.error)}`);
-  const refusal = standInRefusal(parsed.data);
+  const refusal = standInRefusal(parsed.data) ?? missingRefusal(parsed.data, source);
   if (refusal) throw new Error(refusal);
   return {
     ...parsed.data,
@@ -43,6 +43,18 @@ export function standInRefusal(env: Env): string | null {
   if (env.STRIPE_WEBHOOK_SECRET === "whsec_stand_in") return standIn("STRIPE_WEBHOOK_SECRET", "set your endpoint's secret");
   if (/^smtp:\/\/(127\.0\.0\.1|localhost):1025/.test(env.SMTP_URL)) return standIn("SMTP_URL", "set your mail server");
   return null;
+}
+
+/** What production has to be told, since the built-in value is a demo's. */
+const needed = ["PUBLIC_URL", "MAIL_FROM", "PROGRAMME_NAME", "PROGRAMME_PHONE"] as const;
+
+export function missingRefusal(env: Env, source: Record<string, string | undefined>): string | null {
+  if (env.DUNLIN_ENV !== "production") return null;
+  const missing = needed.filter((name) => !source[name]);
+  if (missing.length > 0) return `Production needs ${missing.join(", ")}. See .env.example; for a trial run, set DUNLIN_ENV=demo.`;
+  if (!env.PUBLIC_URL.startsWith("https:")) return "PUBLIC_URL has to begin with https: in production, or sign-ins could be read on the way.";
+  const placeholder = [env.STRIPE_SECRET_KEY, env.STRIPE_WEBHOOK_SECRET].find((value) => value.includes("..."));
+  return placeholder ? `${placeholder} is the example's text, not a secret of yours. Take the secrets from Stripe's dashboard.` : null;
 }
 
 function standIn(name: string, todo: string): string {

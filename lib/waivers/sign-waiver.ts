@@ -1,7 +1,7 @@
 import { mayChangeRegistration } from "@/lib/registrations/registration-policy";
 import { isLive } from "@/lib/registrations/registration";
 import { findOwnRegistration } from "@/lib/registrations/registration-store";
-import { confirmIfComplete } from "@/lib/registrations/settle-seats";
+import { broughtUpToNow, confirmIfComplete } from "@/lib/registrations/settle-seats";
 import { isSignedIn, personIdOf } from "@/lib/shared/actor";
 import { dayOf } from "@/lib/shared/dates";
 import { conflict, forbidden, invalid, ok } from "@/lib/shared/outcome";
@@ -14,12 +14,13 @@ export const signWaiver = defineCommand({
   input: signWaiverSchema,
   load: (conn, actor, input, now) => {
     const registration = findOwnRegistration(conn, personIdOf(actor) ?? "", input.registrationId, now);
-    const text = findWaiverInForce(conn, now.slice(0, 10));
+    const text = registration && findWaiverInForce(conn, dayOf(now, registration.outing.site.zone));
     return registration && text ? { registration, text } : null;
   },
   allow: (actor, { registration }) => mayChangeRegistration(actor, registration),
-  run: ({ conn, now, actor, input, found: { registration, text } }) => {
+  run: ({ conn, now, actor, input, found: { registration: found, text } }) => {
     if (!isSignedIn(actor)) return forbidden();
+    const registration = broughtUpToNow(conn, now, found);
     if (registration.signature) return ok({ registrationId: registration.id });
     if (!isLive(registration.state)) {
       return conflict("not-live", "The time to finish this registration is over. Register again from the outing's page.");

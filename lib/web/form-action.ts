@@ -39,7 +39,7 @@ export function formAction<Schema extends z.ZodType, Value>(useCase: UseCase<Sch
 }
 
 function refusedState(refusal: Refusal, context: Context, form: FormData, attempt: number): FormState {
-  const signedOut = !isSignedIn(context.actor) && refusal.kind !== "invalid" && refusal.kind !== "conflict";
+  const signedOut = !isSignedIn(context.actor) && refusal.kind === "forbidden";
   const sentence = signedOut
     ? "You are signed out, so this was not saved. What you typed is still here: sign in in another tab, then send it again."
     : refusal.sentence;

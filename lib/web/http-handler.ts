@@ -1,7 +1,7 @@
 import type { NextRequest } from "next/server";
 import type { z } from "zod";
 import type { Refusal } from "@/lib/shared/outcome";
-import { payments, type Actor } from "@/lib/shared/actor";
+import { isSignedIn, payments, type Actor } from "@/lib/shared/actor";
 import type { Context, UseCase } from "@/lib/shared/use-case";
 import { database } from "./database";
 import { currentContext } from "./session";
@@ -19,9 +19,17 @@ export function httpHandler<Schema extends z.ZodType, Value>(useCase: UseCase<Sc
   return async (request, route) => {
     const context = await currentContext();
     const outcome = await useCase(context, options.read(request, await route.params));
-    if (!outcome.ok) return problemResponse(outcome.refusal);
+    if (!outcome.ok) return signInFirst(request, context, outcome.refusal) ?? problemResponse(outcome.refusal);
     return options.respond ? options.respond(outcome.value, request, context) : Response.json(outcome.value);
   };
+}
+
+/** A person who opens a private document while signed out is sent to sign in; a program gets its answer. */
+function signInFirst(request: NextRequest, { actor }: Context, { kind }: Refusal): Response | null {
+  const isPerson = request.headers.get("accept")?.includes("text/html") ?? false;
+  if (!isPerson || isSignedIn(actor) || kind === "invalid" || kind === "conflict") return null;
+  const back = encodeURIComponent(request.nextUrl.pathname + request.nextUrl.search);
+  return new Response(null, { status: 303, headers: { location: `/sign-in?back=${back}` } });
 }
 
 /**

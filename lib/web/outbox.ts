@@ -1,7 +1,9 @@
 import { composeLetter } from "@/emails/compose-letter";
 import { deliverDue } from "@/lib/messages/deliver-due";
 import { releaseLapsedHolds } from "@/lib/registrations/release-lapsed-holds";
+import { forgetOldSignInAttempts } from "@/lib/people/person-store";
 import { theClock } from "@/lib/shared/actor";
+import { minutesLater } from "@/lib/shared/dates";
 import { env } from "@/lib/shared/env";
 import { log } from "@/lib/shared/log";
 import { database } from "./database";
@@ -39,8 +41,16 @@ export function startClock(): void {
 async function tick(): Promise<void> {
   try {
     await releaseLapsedHolds(systemContext(theClock), {});
-    await deliverOutbox();
+    await tidySessions();
+    if (!post().running) await deliverOutbox();
   } catch (error) {
     log.error({ problem: String(error) }, "the clock's round did not finish");
   }
+}
+
+/** Sessions nobody used for thirty days, and wrong tries to sign in that are past counting. */
+async function tidySessions(): Promise<void> {
+  const { conn, sessions } = database();
+  await sessions.deleteExpiredSessions();
+  forgetOldSignInAttempts(conn, minutesLater(new Date().toISOString(), -24 * 60));
 }

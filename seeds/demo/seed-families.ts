@@ -1,7 +1,7 @@
 import { addChild } from "@/lib/families/add-child";
 import type { AccessProfile } from "@/lib/families/access-profile";
 import { insertHousehold } from "@/lib/families/household-store";
-import { writeProfile } from "@/lib/families/write-profile";
+import { writeProfile } from "@/lib/registrations/write-profile";
 import { mailConfirmation } from "@/lib/people/mail-links";
 import { confirmEmail, giveRole, insertPerson } from "@/lib/people/person-store";
 import type { SignedIn } from "@/lib/shared/actor";
@@ -33,7 +33,7 @@ async function signUpFamily(story: Story, family: DemoFamily, at: string, passwo
   const id = insertPerson(conn, at, { ...person, phone: family.phone, passwordHash });
   giveRole(conn, id, "guardian");
   insertHousehold(conn, at, id);
-  mailConfirmation(conn, at, { id, ...person });
+  mailConfirmation(conn, at, { id, email: person.email }, { name: person.name, passwordHash, back: "" });
   await sendPost(story, at);
   confirmEmail(conn, id, minutesLater(at, 3));
   return signedIn(story, id);

@@ -1,7 +1,7 @@
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { openDatabaseCopy } from "../support/database";
 import { askAndUndo, exportedUseCases, useCases } from "./collected-use-cases";
-import { decisions } from "./decided-doors";
+import { decisions, family } from "./decided-doors";
 import { makeDecidedWorld, subjects, type DecidedWorld } from "./decided-world";
 
 let given: DecidedWorld;
@@ -37,10 +37,15 @@ describe("who may do what", () => {
     expect(useCase.input.safeParse(input).error?.issues ?? []).toEqual([]);
     const answers = new Map<string, string>();
     for (const subject of subjects) {
-      const outcome = await askAndUndo(given, subject, useCase, input);
+      const outcome = await askAndUndo(given, given.actors[subject], useCase, input);
       answers.set(subject, outcome.ok ? "ok" : outcome.refusal.kind);
     }
     const wanted = new Map(subjects.map((subject) => [subject, decision.to.includes(subject) ? "ok" : decision.hidden ? "not-found" : "forbidden"]));
     expect(Object.fromEntries(answers)).toEqual(Object.fromEntries(wanted));
+  });
+
+  it.each(rows.filter(([, , { to }]) => to === family))("%s is refused to one of the household who is not a guardian", async (_name, useCase, decision) => {
+    const outcome = await askAndUndo(given, given.noGuardian, useCase, decision.input(given));
+    expect(outcome).toMatchObject({ ok: false, refusal: { kind: "forbidden" } });
   });
 });

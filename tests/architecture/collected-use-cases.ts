@@ -1,6 +1,7 @@
 import type { Context, AnyUseCase } from "@/lib/shared/use-case";
 import type { Outcome } from "@/lib/shared/outcome";
-import type { DecidedWorld, Subject } from "./decided-world";
+import type { Actor } from "@/lib/shared/actor";
+import type { DecidedWorld } from "./decided-world";
 
 const modules = import.meta.glob<Record<string, unknown>>("../../lib/**/*.ts", { eager: true });
 
@@ -18,10 +19,10 @@ export const useCases: ReadonlyMap<string, AnyUseCase> = new Map(
 /** How many exports there are, to notice two use cases of one name. */
 export const exportedUseCases = Object.values(modules).flatMap((module) => Object.values(module)).filter(isUseCase);
 
-/** Asks as a subject and undoes whatever came of it, so that one world serves them all. */
-export async function askAndUndo(given: DecidedWorld, subject: Subject, useCase: AnyUseCase, input: unknown): Promise<Outcome<unknown>> {
+/** Asks as somebody and undoes whatever came of it, so that one world serves them all. */
+export async function askAndUndo(given: DecidedWorld, actor: Actor, useCase: AnyUseCase, input: unknown): Promise<Outcome<unknown>> {
   const { conn, now } = given.world;
-  const context: Context = { conn, now, actor: given.actors[subject] };
+  const context: Context = { conn, now, actor };
   conn.raw.exec("begin");
   try {
     return await useCase(context, input);

@@ -19,7 +19,7 @@ const guardians: Subject[] = ["guardian", "another guardian"];
 const leaders: Subject[] = ["leader", "another leader"];
 const helpers: Subject[] = ["chaperone", "another chaperone", ...leaders];
 /** Of this family. */
-const family: Subject[] = ["guardian"];
+export const family: Subject[] = ["guardian"];
 /** Of this day. */
 const rosterReaders: Subject[] = ["leader", ...staff];
 
@@ -52,6 +52,8 @@ export const decisions: Readonly<Record<string, Decision>> = {
   showMe: { to: signedIn, input: nothing, hidden: true },
   changeReading: { to: signedIn, input: () => ({ readingFormat: "large print", textSizePt: "24" }), hidden: true },
   invite: { to: staff, input: () => ({ name: "Ada Moss", email: "ada@example.org", role: "chaperone" }) },
+  takeRole: { to: ["admin"], input: ({ people }) => ({ personId: people.chaperone.personId, role: "chaperone" }) },
+  becomeGuardian: { to: signedIn, input: nothing },
   listPeople: { to: staff, input: nothing },
 
   // Families
@@ -90,7 +92,7 @@ export const decisions: Readonly<Record<string, Decision>> = {
   showRegistration: { to: family, input: held, hidden: true },
   listMyRegistrations: { to: guardians, input: nothing },
   confirmNeeds: { to: family, input: needs, hidden: true },
-  withdraw: { to: family, input: held, hidden: true },
+  withdraw: { to: family, input: (given) => ({ ...held(given), sure: "yes" }), hidden: true },
   listOutingPeople: { to: staff, input: open },
   releaseLapsedHolds: { to: ["the clock"], input: nothing },
   showWaiver: { to: everybody, input: nothing },
@@ -108,6 +110,8 @@ export const decisions: Readonly<Record<string, Decision>> = {
     }),
   },
   listMoneyToReturn: { to: staff, input: nothing },
+
+  returnPayment: { to: staff, input: ({ returnableId }) => ({ paymentId: returnableId }) },
 
   // Helpers
   askToHelp: {
@@ -132,6 +136,7 @@ export const decisions: Readonly<Record<string, Decision>> = {
   listDays: { to: leaders, input: nothing },
   listPapers: { to: rosterReaders, input: open, hidden: true },
   printRoster: { to: rosterReaders, input: (given) => ({ ...open(given), form: "large print", textSizePt: "20" }), hidden: true },
+  openContacts: { to: rosterReaders, input: open, hidden: true },
   openPaper: { to: rosterReaders, input: ({ paperId }) => ({ paperId }), hidden: true },
 
   // Mail, models and the site itself

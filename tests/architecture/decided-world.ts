@@ -1,5 +1,6 @@
+import { findHouseholdOf } from "@/lib/families/household-store";
 import { setAnswer, insertAnswer } from "@/lib/helpers/helper-store";
-import { attachSession, insertPayment } from "@/lib/payments/payment-store";
+import { attachSession, insertPayment, noteExtraPayment } from "@/lib/payments/payment-store";
 import { makeMailLink } from "@/lib/people/mail-link-store";
 import { setNameAndPassword } from "@/lib/people/person-store";
 import { hashPassword } from "@/lib/people/passwords";
@@ -12,7 +13,7 @@ import { minutesLater } from "@/lib/shared/dates";
 import { insertModel } from "@/lib/teaching-models/teaching-model-store";
 import { signWaiver } from "@/lib/waivers/sign-waiver";
 import { knex, type Connection } from "@/db/connection";
-import { makeAdmin, makeChaperone, makeCoordinator, makeGuardian, makeLeader } from "../support/actors";
+import { makeAdmin, makeChaperone, makeCoordinator, makeGuardian, makeLeader, makePerson } from "../support/actors";
 import { allowed, makeChild, makeOuting, makeWorld, typedProfile, writeProfileOf, type World } from "../support/world";
 
 /** Everybody who could ask. "another" is somebody with the role and nothing to do with this family or this day. */
@@ -33,13 +34,17 @@ export async function makeDecidedWorld(conn: Connection) {
   const { childId, newcomerId, heldId, confirmedId } = await makeRegistrations(world, people.guardian, outing.slug);
   const paymentId = insertPayment(conn, world.now, { registrationId: heldId, amountCents: 1200, currency: "usd" });
   attachSession(conn, paymentId, "cs_decided", "http://127.0.0.1:1/pay");
+  const returnableId = insertPayment(conn, world.now, { registrationId: confirmedId, amountCents: 700, currency: "usd" });
+  noteExtraPayment(conn, world.now, returnableId, "pi_extra");
   const { answerId, answerSecret } = askHelpers(world, people, outing.id);
   const { paperId } = await allowed(world, people.coordinator, printRoster, { slug: outing.slug, form: "standard" });
   const link = (purpose: "sign-in" | "invitation", person: SignedIn) =>
     makeMailLink(conn, { purpose, personId: person.personId, madeAt: world.now, expiresAt: minutesLater(world.now, 600) });
   const secrets = { answer: answerSecret, signIn: link("sign-in", people.guardian), invitation: link("invitation", people.chaperone) };
   const modelSlug = makeModel(world);
-  return { world, actors, people, outing, draft, childId, newcomerId, heldId, confirmedId, paymentId, answerId, paperId, secrets, modelSlug };
+  const noGuardian = makeOneOfTheHousehold(world, people.guardian);
+  const ids = { childId, newcomerId, heldId, confirmedId, paymentId, returnableId, answerId, paperId };
+  return { world, actors, people, noGuardian, outing, draft, ...ids, secrets, modelSlug };
 }
 
 export type DecidedWorld = Awaited<ReturnType<typeof makeDecidedWorld>>;
@@ -55,6 +60,14 @@ function makePeople(world: World) {
     coordinator: makeCoordinator(world),
     admin: makeAdmin(world),
   };
+}
+
+/** In the family's household, and without the role: the records are theirs to find and not theirs to touch. */
+function makeOneOfTheHousehold(world: World, guardian: SignedIn): SignedIn {
+  const person = makePerson(world, "Uncle Reyes", []);
+  const householdId = findHouseholdOf(world.conn, guardian.personId) ?? "";
+  world.conn.run(knex("household_guardians").insert({ household_id: householdId, person_id: person.personId }));
+  return person;
 }
 
 async function givePassword(world: World, person: SignedIn, password: string): Promise<void> {

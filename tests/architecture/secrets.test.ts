@@ -14,6 +14,8 @@ beforeAll(async () => {
   remove = copy.remove;
   given = await makeDecidedWorld(copy.conn);
   const hashes = copy.conn.all(knex("people").whereNotNull("password_hash").select("password_hash")).map((row) => row.password_hash ?? "");
+  const carried = copy.conn.all(knex("mail_links").whereNotNull("carries").select("carries"));
+  for (const { carries } of carried) hashes.push((JSON.parse(carries ?? "{}") as { passwordHash: string }).passwordHash);
   const links = copy.conn.all(knex("mail_links").select("secret_hash")).map((row) => row.secret_hash);
   secrets = [...hashes, ...links, ...Object.values(given.secrets)];
 });
@@ -27,7 +29,7 @@ async function toldTo(subject: Subject, names: readonly string[]): Promise<strin
     const useCase = useCases.get(name);
     const decision = decisions[name];
     if (!useCase || !decision) continue;
-    const outcome = await askAndUndo(given, subject, useCase, decision.input(given));
+    const outcome = await askAndUndo(given, given.actors[subject], useCase, decision.input(given));
     told.push(JSON.stringify(outcome));
   }
   return told.join("\n");

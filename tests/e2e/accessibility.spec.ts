@@ -75,6 +75,7 @@ test("a look that was chosen is there from the first byte of every page, and wit
 
 async function expectAccessible(page: Page): Promise<void> {
   await expect(page.getByRole("heading", { level: 1 })).toHaveCount(1);
+  await expect(page.getByRole("heading", { level: 1 })).not.toHaveText(/went wrong/);
   await expect(page.locator("html")).toHaveAttribute("lang", "en");
   await expect(page.locator("body > a").first()).toHaveText("Skip to the content");
   for (const theme of themes) {

@@ -8,9 +8,10 @@ import { listDesk } from "@/lib/desk/list-desk";
 import { listDeliveries } from "@/lib/messages/list-deliveries";
 import { listMoneyToReturn } from "@/lib/payments/list-money-to-return";
 import { moneyInWords } from "@/lib/shared/money";
+import { counted } from "@/lib/shared/words";
 import { ask } from "@/lib/web/ask";
 import { pathTo } from "@/lib/web/paths";
-import { retryDeliveriesAction } from "./messages/actions";
+import { retryDeliveriesAction, returnPaymentAction } from "./messages/actions";
 
 export const metadata: Metadata = { title: "Desk" };
 
@@ -22,11 +23,11 @@ export default async function DeskPage() {
   const needing = toCome.filter((one) => one.verdict?.kind === "you").length;
   return (
     <>
-      <PageHeading title="Desk" facts={`${toCome.length} outings to come. ${stopped} stopped, ${needing} not yet ready.`} />
+      <PageHeading title="Desk" facts={`${counted(toCome.length, "outing", "outings")} to come. ${stopped} stopped, ${needing} not yet ready.`} />
       {unsent.waiting + unsent.failed > 0 && (
-        <Verdict kind="you" sentence={`${unsent.waiting + unsent.failed} mails could not be sent yet.`}>
+        <Verdict kind="you" sentence={`${counted(unsent.waiting + unsent.failed, "mail", "mails")} could not be sent yet.`}>
           <p>
-            The mail server did not take them. They are kept: {unsent.waiting} are tried again by themselves, {unsent.failed} have been given up.{" "}
+            The mail server did not take them. They are kept. Tried again by themselves: {unsent.waiting}; given up: {unsent.failed}.{" "}
             <Link href="/desk/messages">See which</Link>
           </p>
           <ActionForm action={retryDeliveriesAction} submit="Send them again now" look="second" />
@@ -38,6 +39,7 @@ export default async function DeskPage() {
             {money.map((one) => (
               <li key={one.paymentId}>
                 {one.nameUsed}: {moneyInWords({ cents: one.amountCents, currency: one.currency })}, {one.why}.
+                <ActionForm action={returnPaymentAction} submit={`Note that ${one.nameUsed}'s money was given back`} look="second" carry={{ paymentId: one.paymentId }} scope={one.paymentId} />
               </li>
             ))}
           </ul>
@@ -83,7 +85,7 @@ export default async function DeskPage() {
                 <Link href={pathTo.deskOuting(outing.slug)} className="font-bold">
                   {outing.title}
                 </Link>
-                . {outing.dayInWords}. {outing.state === "called off" ? "Called off." : `${outing.seats - outing.seatsFree} people.`}
+                . {outing.dayInWords}. {outing.state === "called off" ? "Called off." : `${counted(outing.seats - outing.seatsFree, "person", "people")}.`}
               </li>
             ))}
           </ul>

@@ -5,7 +5,6 @@ import { PageHeading } from "@/components/ui/page-heading";
 import { Verdict } from "@/components/ui/verdict";
 import { listChildren } from "@/lib/families/list-children";
 import { listMyRegistrations } from "@/lib/registrations/list-my-registrations";
-import { isLive } from "@/lib/registrations/registration";
 import { ask } from "@/lib/web/ask";
 import { pathTo } from "@/lib/web/paths";
 
@@ -13,8 +12,8 @@ export const metadata: Metadata = { title: "Your family" };
 
 export default async function FamilyPage() {
   const [children, registrations] = [await ask(listChildren, {}), await ask(listMyRegistrations, {})];
-  const toCome = registrations.filter((one) => isLive(one.state) && one.outing.room !== "done");
-  const past = registrations.filter((one) => one.state === "confirmed" && one.outing.room === "done");
+  const toCome = registrations.filter((one) => one.isOn);
+  const past = registrations.filter((one) => one.state === "confirmed" && !one.isOn);
   const unfinished = toCome.filter((one) => one.state === "held");
   return (
     <>
@@ -74,7 +73,7 @@ export default async function FamilyPage() {
       {past.length > 0 && (
         <section aria-labelledby="past" className="mt-12">
           <h2 id="past" className="mb-3">
-            Where you have been
+            Past and called off
           </h2>
           <RegistrationLines registrations={past} />
         </section>

@@ -31,7 +31,7 @@ export default async function HelpingPage() {
           <p>
             {one.outing.whenAndWhere} {one.task === "leader" ? "You are asked to lead." : "You are asked as a chaperone."}
           </p>
-          <ActionForm action={answerRequestAction} submit="Send my answer" look={one.state === "asked" ? "first" : "second"} carry={{ answerId: one.answerId }} answer="below">
+          <ActionForm action={answerRequestAction} submit="Send my answer" look={one.state === "asked" ? "first" : "second"} carry={{ answerId: one.answerId }} answer="below" scope={one.answerId}>
             <Choices
               name="answer"
               legend={`Will you come to ${one.outing.title}?`}

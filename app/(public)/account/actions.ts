@@ -1,5 +1,6 @@
 "use server";
 
+import { becomeGuardian } from "@/lib/families/become-guardian";
 import { changeReading } from "@/lib/people/change-reading";
 import { signOut } from "@/lib/people/sign-out";
 import { formAction } from "@/lib/web/form-action";
@@ -10,6 +11,10 @@ export const signOutAction = formAction(signOut, {
     await endSession();
     return { to: "/" };
   },
+});
+
+export const becomeGuardianAction = formAction(becomeGuardian, {
+  next: () => ({ to: "/family" }),
 });
 
 export const changeReadingAction = formAction(changeReading, {

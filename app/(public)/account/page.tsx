@@ -2,14 +2,15 @@ import type { Route } from "next";
 import type { Metadata } from "next";
 import Link from "next/link";
 import { ActionForm } from "@/components/forms/action-form";
-import { Choices, choicesOf } from "@/components/forms/choices";
+import { choicesOf } from "@/components/forms/choice";
+import { Choices } from "@/components/forms/choices";
 import { TextField } from "@/components/forms/text-field";
 import { PageHeading } from "@/components/ui/page-heading";
 import { readingFormats } from "@/lib/people/person";
 import { showMe } from "@/lib/people/show-me";
 import type { Role } from "@/lib/shared/actor";
 import { ask } from "@/lib/web/ask";
-import { changeReadingAction, signOutAction } from "./actions";
+import { becomeGuardianAction, changeReadingAction, signOutAction } from "./actions";
 
 export const metadata: Metadata = { title: "Your account" };
 
@@ -44,6 +45,15 @@ export default async function AccountPage() {
           <TextField name="textSizePt" label="Size of large print, in points" isShort inputMode="numeric" value={String(me.textSizePt)} hint="18 is common large print; from 14 to 36." />
         </ActionForm>
       </section>
+      {!me.roles.includes("guardian") && (
+        <section aria-labelledby="children" className="mt-12">
+          <h2 id="children" className="pb-1.5 border-b-2 border-edge">
+            Children of your own
+          </h2>
+          <p className="mt-3">With this account you can register your own children as well.</p>
+          <ActionForm action={becomeGuardianAction} submit="Start a family page" look="second" />
+        </section>
+      )}
       <section aria-labelledby="leave" className="mt-12">
         <h2 id="leave" className="pb-1.5 border-b-2 border-edge">
           Leave

@@ -13,11 +13,9 @@ export const signInAction = formAction(signIn, {
         await startSession(answer.personId);
         return { to: safeBack(form.get("back")) };
       case "wrong":
-        return { refuse: { kind: "invalid", sentence: "There is a problem", fields: { password: "This address and password do not fit together. Try again, or ask for a link by e-mail below." } } };
+        return { refuse: { kind: "invalid", sentence: "There is a problem", fields: { password: "This address and password do not fit together, or the address is not confirmed yet. Try again, or ask for a link by e-mail below." } } };
       case "too-many":
         return { refuse: { kind: "conflict", code: "too-many", sentence: "Too many wrong tries for this address. Wait a quarter of an hour, or ask for a link by e-mail below." } };
-      case "unconfirmed":
-        return { refuse: { kind: "conflict", code: "unconfirmed", sentence: "This e-mail address is not confirmed yet. We have sent you the link again: open it, and you are signed in." } };
     }
   },
 });

@@ -23,7 +23,7 @@ export default async function SignInPage({ searchParams }: Props) {
           Or without a password
         </h2>
         <p className="mt-3">We send a link to your address. Open it, and you are signed in: nothing to remember and nothing to copy.</p>
-        <ActionForm action={askForLinkAction} submit="Send me a link" look="second">
+        <ActionForm action={askForLinkAction} submit="Send me a link" look="second" scope="link">
           <TextField name="linkEmail" label="E-mail address for the link" type="email" autoComplete="email" spellCheck={false} />
         </ActionForm>
       </section>

@@ -3,7 +3,7 @@ import { knex } from "@/db/connection";
 import { addChild } from "@/lib/families/add-child";
 import { listChildren } from "@/lib/families/list-children";
 import { showChild } from "@/lib/families/show-child";
-import { writeProfile } from "@/lib/families/write-profile";
+import { writeProfile } from "@/lib/registrations/write-profile";
 import { confirmNeeds } from "@/lib/registrations/confirm-needs";
 import { registerChild } from "@/lib/registrations/register-child";
 import { findProfile } from "@/lib/families/participant-store";

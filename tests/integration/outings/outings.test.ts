@@ -1,6 +1,6 @@
 import { describe, expect, it } from "vitest";
 import { callOffOuting } from "@/lib/registrations/call-off-outing";
-import { changeOuting } from "@/lib/outings/change-outing";
+import { changeOuting } from "@/lib/registrations/change-outing";
 import { closeOuting } from "@/lib/outings/close-outing";
 import { listOutings } from "@/lib/outings/list-outings";
 import { planOuting } from "@/lib/outings/plan-outing";

@@ -95,7 +95,8 @@ describe("a payment", () => {
     const first = await openPayment(world, family, registrationId);
     const second = await openPayment(world, family, registrationId, "20");
     expect(await tellPaid(world, first)).toBe("settled");
-    expect(await tellPaid(world, second)).toBe("paid twice");
+    expect(await tellPaid(world, second, "evt_extra")).toBe("paid twice");
+    expect(await tellPaid(world, second, "evt_extra")).toBe("seen before");
     expect(await allowed(world, makeCoordinator(world), listMoneyToReturn, {})).toEqual([
       { paymentId: second.id, nameUsed: "Amaya", amountCents: 2000, currency: "usd", why: "paid twice" },
     ]);
@@ -199,7 +200,7 @@ describe("money that comes after the hold ran out", () => {
     const taken = await register(world, other, outing.slug);
     await tellPaid(world, page);
     expect(registrationOf(world, registrationId)).toMatchObject({ state: "waiting", placeInQueue: 1, feeSettled: true });
-    await allowed(world, other.guardian, withdraw, { registrationId: taken.registrationId });
+    await allowed(world, other.guardian, withdraw, { registrationId: taken.registrationId, sure: "yes" });
     expect(registrationOf(world, registrationId).state).toBe("confirmed");
     expect(outbox(world, "seat-offered")).toEqual([]);
   });
@@ -217,7 +218,7 @@ describe("money that comes after the hold ran out", () => {
   it("does not bring back a child whose family gave the seat back; it is money to return", async () => {
     const { world, family, registrationId } = await oneAlmostThere();
     const page = await openPayment(world, family, registrationId);
-    await allowed(world, family.guardian, withdraw, { registrationId });
+    await allowed(world, family.guardian, withdraw, { registrationId, sure: "yes" });
     expect(await tellPaid(world, page)).toBe("withdrawn");
     expect(registrationOf(world, registrationId).state).toBe("withdrawn");
     expect(await allowed(world, makeCoordinator(world), listMoneyToReturn, {})).toMatchObject([{ amountCents: 1200, why: "withdrawn" }]);
@@ -237,7 +238,7 @@ describe("giving a paid seat back", () => {
   it("is said to be paid, and staff see the money to return", async () => {
     const { world, family, registrationId } = await oneAlmostThere();
     await tellPaid(world, await openPayment(world, family, registrationId));
-    expect(await allowed(world, family.guardian, withdraw, { registrationId })).toMatchObject({ paid: true });
+    expect(await allowed(world, family.guardian, withdraw, { registrationId, sure: "yes" })).toMatchObject({ paid: true });
     expect(await allowed(world, makeCoordinator(world), listMoneyToReturn, {})).toMatchObject([{ nameUsed: "Amaya", why: "withdrawn" }]);
   });
 });

@@ -1,5 +1,6 @@
 import { describe, expect, it } from "vitest";
 import { knex } from "@/db/connection";
+import { findHouseholdOf } from "@/lib/families/household-store";
 import { acceptInvitation } from "@/lib/people/accept-invitation";
 import { askForSignInLink } from "@/lib/people/ask-for-sign-in-link";
 import { changeReading } from "@/lib/people/change-reading";
@@ -33,13 +34,14 @@ async function confirmedAda(): Promise<World> {
 }
 
 describe("signing up", () => {
-  it("makes a guardian with a household, whose e-mail has to be confirmed before the password opens anything", async () => {
+  it("makes a guardian with a household once the mailed link is followed; before it the password opens nothing", async () => {
     const world = makeWorld();
     await allowed(world, visitor, signUp, ada);
-    expect(findPersonByEmail(world.conn, "ada@example.org")).toMatchObject({ name: "Ada Moss", roles: ["guardian"], emailConfirmed: false });
-    expect(await allowed(world, visitor, signIn, credentials)).toEqual({ kind: "unconfirmed" });
-    expect(outbox(world, "confirm-email")).toHaveLength(2);
-    await allowed(world, visitor, followMailLink, { secret: secretIn(world, "confirm-email") });
+    expect(findPersonByEmail(world.conn, "ada@example.org")).toMatchObject({ roles: [], emailConfirmed: false, hasPassword: false });
+    expect((await allowed(world, visitor, signIn, credentials)).kind).not.toBe("signed-in");
+    const { personId } = await allowed(world, visitor, followMailLink, { secret: secretIn(world, "confirm-email") });
+    expect(actorOf(world.conn, personId)).toMatchObject({ name: "Ada Moss", roles: ["guardian"] });
+    expect(findHouseholdOf(world.conn, personId)).not.toBeNull();
     expect((await allowed(world, visitor, signIn, credentials)).kind).toBe("signed-in");
   });
 
@@ -54,15 +56,29 @@ describe("signing up", () => {
     expect(outbox(world, "already-registered")).toHaveLength(1);
   });
 
-  it("twice before the address is proved: the last password holds and only the newest link works", async () => {
+  it("by a stranger with somebody's address never gives the stranger's password to the account, in whatever order", async () => {
+    const theirs = { ...ada, name: "Mallory", password: "the stranger's password" };
+    for (const order of [[theirs, ada], [ada, theirs]]) {
+      const world = makeWorld();
+      const secrets = new Map<string, string>();
+      for (const form of order) {
+        await allowed(world, visitor, signUp, form);
+        secrets.set(form.password, secretIn(world, "confirm-email"));
+      }
+      await allowed(world, visitor, followMailLink, { secret: secrets.get(ada.password) });
+      await ask(world, visitor, followMailLink, { secret: secrets.get(theirs.password) });
+      expect(await allowed(world, visitor, signIn, { ...credentials, password: theirs.password })).toEqual({ kind: "wrong" });
+      expect((await allowed(world, visitor, signIn, credentials)).kind).toBe("signed-in");
+      expect(findPersonByEmail(world.conn, "ada@example.org")?.name).toBe("Ada Moss");
+    }
+  });
+
+  it("by a stranger is not made true by a sign-in link the owner asks for", async () => {
     const world = makeWorld();
-    await allowed(world, visitor, signUp, { ...ada, password: "the first password" });
-    const first = secretIn(world, "confirm-email");
-    await allowed(world, visitor, signUp, ada);
-    expect(await refused(world, visitor, followMailLink, { secret: first })).toMatchObject({ code: "link-spent" });
-    await allowed(world, visitor, followMailLink, { secret: secretIn(world, "confirm-email") });
-    expect(await allowed(world, visitor, signIn, { ...credentials, password: "the first password" })).toEqual({ kind: "wrong" });
-    expect((await allowed(world, visitor, signIn, credentials)).kind).toBe("signed-in");
+    await allowed(world, visitor, signUp, { ...ada, password: "the stranger's password" });
+    await allowed(world, visitor, askForSignInLink, { linkEmail: "ada@example.org" });
+    await allowed(world, visitor, followMailLink, { secret: secretIn(world, "sign-in-link") });
+    expect(await allowed(world, visitor, signIn, { ...credentials, password: "the stranger's password" })).toEqual({ kind: "wrong" });
   });
 
   it("at once with the same address makes one account", async () => {
@@ -91,8 +107,10 @@ describe("signing up", () => {
     const world = makeWorld();
     await allowed(world, visitor, signUp, ada);
     const secret = secretIn(world, "confirm-email");
+    const links = JSON.stringify(world.conn.all(knex("mail_links").select("secret_hash", "purpose", "person_id", "about_id", "carries")));
+    for (const hidden of [secret, ada.password]) expect(links).not.toContain(hidden);
+    await allowed(world, visitor, followMailLink, { secret });
     expect(JSON.stringify(world.conn.all(knex("people").select("password_hash")))).toMatch(/\$argon2id\$v=19\$m=19456,t=2,p=1\$/);
-    expect(JSON.stringify(world.conn.all(knex("mail_links").select("secret_hash", "purpose", "person_id", "about_id")))).not.toContain(secret);
   });
 });
 
@@ -188,7 +206,22 @@ describe("an invitation", () => {
     expect(actorOf(world.conn, personId)).toMatchObject({ name: "Bo Lind", roles: ["chaperone"] });
     expect((await allowed(world, visitor, signIn, { email: "bo@example.org", password: "reeds and rain and salt" })).kind).toBe("signed-in");
     const again = await refused(world, visitor, acceptInvitation, { secret, name: "Mallory", password: "another password" });
-    expect(again).toMatchObject({ code: "link-spent" });
+    expect(again).toMatchObject({ code: "has-account" });
+    expect(actorOf(world.conn, personId)?.name).toBe("Bo Lind");
+  });
+
+  it("cannot be turned into an account with a stranger's password, before or after it is accepted", async () => {
+    const world = makeWorld();
+    const theirs = { ...ada, email: "bo@example.org", password: "the stranger's password" };
+    await allowed(world, visitor, signUp, theirs);
+    const before = secretIn(world, "confirm-email");
+    await allowed(world, makeAdmin(world), invite, { name: "Bo", email: "bo@example.org", role: "coordinator" });
+    await allowed(world, visitor, signUp, theirs);
+    expect(outbox(world, "confirm-email")).toHaveLength(1);
+    const secret = secretIn(world, "invitation");
+    await allowed(world, visitor, acceptInvitation, { secret, name: "Bo Lind", password: "reeds and rain and salt" });
+    expect(await refused(world, visitor, followMailLink, { secret: before })).toMatchObject({ code: "link-spent" });
+    expect(await allowed(world, visitor, signIn, { email: "bo@example.org", password: theirs.password })).toEqual({ kind: "wrong" });
   });
 
   it("by a coordinator is for chaperones and leaders; only an admin makes coordinators and admins", async () => {

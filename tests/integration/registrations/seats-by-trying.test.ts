@@ -45,7 +45,7 @@ async function step(one: Try, pick: (below: number) => number): Promise<string> 
       model.registers(expected, child, world.now);
       return `${child} registers`;
     case 2:
-      await ask(world, guardian, withdraw, { registrationId });
+      await ask(world, guardian, withdraw, { registrationId, sure: "yes" });
       model.withdraws(expected, child, world.now);
       return `${child} withdraws`;
     case 3:

@@ -1,6 +1,6 @@
 import { describe, expect, it } from "vitest";
 import { knex } from "@/db/connection";
-import { changeOuting } from "@/lib/outings/change-outing";
+import { changeOuting } from "@/lib/registrations/change-outing";
 import { closeOuting } from "@/lib/outings/close-outing";
 import { registerChild } from "@/lib/registrations/register-child";
 import { releaseLapsedHolds } from "@/lib/registrations/release-lapsed-holds";
@@ -113,7 +113,7 @@ describe("a hold", () => {
     if (!first || !second) throw new Error("two families were asked for");
     const held = await register(world, first, outing.slug);
     const next = await register(world, second, outing.slug);
-    await allowed(world, first.guardian, withdraw, { registrationId: held.registrationId });
+    await allowed(world, first.guardian, withdraw, { registrationId: held.registrationId, sure: "yes" });
     expect(registrationOf(world, next.registrationId).holdEndsAt).toBe("2027-01-05T17:00:00.000Z");
   });
 
@@ -151,8 +151,8 @@ describe("giving a seat back", () => {
     const { registrationId } = await register(world, first, outing.slug);
     await finish(world, first, registrationId);
     const next = await register(world, second, outing.slug);
-    await allowed(world, first.guardian, withdraw, { registrationId });
-    await allowed(world, first.guardian, withdraw, { registrationId });
+    await allowed(world, first.guardian, withdraw, { registrationId, sure: "yes" });
+    await allowed(world, first.guardian, withdraw, { registrationId, sure: "yes" });
     expect(registrationOf(world, next.registrationId).state).toBe("held");
     expect(outbox(world, "seat-offered")).toHaveLength(1);
   });
@@ -165,7 +165,7 @@ describe("giving a seat back", () => {
     for (const family of families) answers.push(await register(world, family, outing.slug));
     const [, second, third, fourth] = answers.map((answer) => answer.registrationId);
     if (!second || !third || !fourth || !families[1]) throw new Error("four families were asked for");
-    await allowed(world, families[1].guardian, withdraw, { registrationId: second });
+    await allowed(world, families[1].guardian, withdraw, { registrationId: second, sure: "yes" });
     expect([third, fourth].map((id) => registrationOf(world, id).placeInQueue)).toEqual([1, 2]);
   });
 
@@ -175,7 +175,7 @@ describe("giving a seat back", () => {
     const family = makeFamily(world);
     const { registrationId } = await register(world, family, outing.slug);
     world.now = "2027-01-09T20:00:00.000Z";
-    expect(await refused(world, family.guardian, withdraw, { registrationId })).toMatchObject({ kind: "conflict", code: "over" });
+    expect(await refused(world, family.guardian, withdraw, { registrationId, sure: "yes" })).toMatchObject({ kind: "conflict", code: "over" });
   });
 });
 
@@ -237,7 +237,7 @@ describe("who may register when", () => {
     await allowed(world, makeCoordinator(world), closeOuting, { slug: outing.slug });
     await finish(world, first, registrationId);
     expect(registrationOf(world, registrationId).state).toBe("confirmed");
-    await allowed(world, first.guardian, withdraw, { registrationId });
+    await allowed(world, first.guardian, withdraw, { registrationId, sure: "yes" });
     expect(registrationOf(world, waiting.registrationId).state).toBe("waiting");
   });
 

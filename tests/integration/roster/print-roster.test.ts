@@ -41,14 +41,14 @@ describe("the roster", () => {
     expect(await print("standard")).toEqual(first);
     expect((await print("large print")).version).toBe(1);
     expect((await allowed(world, coordinator, listPapers, { slug })).isCurrent).toBe(true);
-    await allowed(world, families.tomas.guardian, withdraw, { registrationId: ids.tomas });
+    await allowed(world, families.tomas.guardian, withdraw, { registrationId: ids.tomas, sure: "yes" });
     expect((await allowed(world, coordinator, listPapers, { slug })).isCurrent).toBe(false);
     expect((await print("standard")).version).toBe(2);
   });
 
   it("keeps everybody's count-off number when somebody withdraws", async () => {
     const { world, coordinator, slug, families, ids } = await aDay();
-    await allowed(world, families.amaya.guardian, withdraw, { registrationId: ids.amaya });
+    await allowed(world, families.amaya.guardian, withdraw, { registrationId: ids.amaya, sure: "yes" });
     const { facts } = await allowed(world, coordinator, listPapers, { slug });
     expect(facts.people.map(({ number, nameUsed }) => [number, nameUsed])).toEqual([[2, "Tomás"]]);
   });

@@ -5,7 +5,7 @@ import path from "node:path";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { knex, openConnection, type Connection } from "@/db/connection";
 import { checkOutingCover } from "@/lib/cover-board/check-outing-cover";
-import { guideNeedOf, supportLevels, travelTools } from "@/lib/families/access-profile";
+import { guideNeedOf, travelTools } from "@/lib/families/access-profile";
 import { filePath } from "@/lib/files/file-store";
 import { listChildren } from "@/lib/families/list-children";
 import { listOutingHelpers } from "@/lib/helpers/list-outing-helpers";
@@ -31,6 +31,7 @@ import { showWaiver } from "@/lib/waivers/show-waiver";
 import { seedDemoWorld, type DemoAccount } from "@/seeds/demo/demo-world";
 import { must } from "@/seeds/demo/story";
 import { openTestDatabase } from "@/tests/support/database";
+import { supportLevels } from "@/lib/cover/support-level";
 
 const folder = mkdtempSync(path.join(tmpdir(), "dunlin-demo-world-"));
 const filesDir = path.join(folder, "files");

@@ -102,7 +102,7 @@ describe("a signature", () => {
     if (!stranger) throw new Error("one family was asked for");
     await register(world, stranger, outing.slug);
     expect((await refused(world, stranger.guardian, signWaiver, signature(world, registrationId))).kind).toBe("not-found");
-    await allowed(world, family.guardian, withdraw, { registrationId });
+    await allowed(world, family.guardian, withdraw, { registrationId, sure: "yes" });
     expect(await refused(world, family.guardian, signWaiver, signature(world, registrationId))).toMatchObject({ code: "not-live" });
   });
 });

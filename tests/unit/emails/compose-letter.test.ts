@@ -27,7 +27,7 @@ const facts: MessageFacts = {
   "seat-offered": { name, outing, registrationId: "r1", until: "Wednesday 6 January 2027, 10:45 a.m." },
   "asked-to-help": { name, outing, task: "chaperone", from: "Ines Amari", link },
   "meeting-point": { name, outing, task: "leader", phone: "360 555 0142", calendar },
-  "called-off": { name, outing, because: "A storm is coming." },
+  "called-off": { name, outing, because: "A storm is coming.", calendar: "BEGIN:VCALENDAR" },
 };
 
 const messages = (Object.keys(facts) as (keyof MessageFacts)[]).map((kind) => ({ kind, facts: facts[kind] }) as Message);

@@ -2,10 +2,15 @@
 
 import { sendMeetingPoint } from "@/lib/helpers/send-meeting-point";
 import { retryDeliveries } from "@/lib/messages/retry-deliveries";
+import { returnPayment } from "@/lib/payments/return-payment";
 import { formAction } from "@/lib/web/form-action";
 
 export const retryDeliveriesAction = formAction(retryDeliveries, {
   next: ({ messages }) => ({ say: messages === 1 ? "One mail is being sent again." : `${messages} mails are being sent again.` }),
+});
+
+export const returnPaymentAction = formAction(returnPayment, {
+  next: () => ({ say: "Noted." }),
 });
 
 export const sendMeetingPointAction = formAction(sendMeetingPoint, {

@@ -17,7 +17,7 @@ export default async function MessagesPage() {
       <PageHeading
         title="Messages"
         crumbs={[{ href: "/desk", text: "Desk" }]}
-        facts={open === 0 ? "Everything has gone out." : `${unsent.waiting} are tried again by themselves; ${unsent.failed} have been given up.`}
+        facts={open === 0 ? "Everything has gone out." : `Tried again by themselves: ${unsent.waiting}. Given up: ${unsent.failed}.`}
       />
       <ActionForm action={retryDeliveriesAction} submit="Send what waits now" look="second" />
       <DeliveryTable deliveries={deliveries} zone={env().PROGRAMME_ZONE} caption="The last 200 mails, newest first" />

@@ -1,6 +1,6 @@
 "use server";
 
-import { changeOuting } from "@/lib/outings/change-outing";
+import { changeOuting } from "@/lib/registrations/change-outing";
 import { closeOuting } from "@/lib/outings/close-outing";
 import { planOuting } from "@/lib/outings/plan-outing";
 import { publishOuting } from "@/lib/outings/publish-outing";

@@ -1,6 +1,7 @@
 import type { Metadata } from "next";
 import { ActionForm } from "@/components/forms/action-form";
-import { Choices, type Choice } from "@/components/forms/choices";
+import type { Choice } from "@/components/forms/choice";
+import { Choices } from "@/components/forms/choices";
 import { SelectField } from "@/components/forms/select-field";
 import { TextField } from "@/components/forms/text-field";
 import { DataTable } from "@/components/ui/data-table";
@@ -8,11 +9,11 @@ import { PageHeading } from "@/components/ui/page-heading";
 import { abilitiesInWords } from "@/lib/helpers/helper";
 import { listPeople } from "@/lib/people/list-people";
 import { mayInvite } from "@/lib/people/person-policy";
-import { roles, type Role } from "@/lib/shared/actor";
+import { hasRole, roles, type Role } from "@/lib/shared/actor";
 import { plainDayInWords } from "@/lib/shared/dates";
 import { ask } from "@/lib/web/ask";
 import { currentActor } from "@/lib/web/session";
-import { changeClearanceAction, inviteAction } from "./actions";
+import { changeClearanceAction, inviteAction, takeRoleAction } from "./actions";
 
 export const metadata: Metadata = { title: "People" };
 
@@ -50,19 +51,29 @@ export default async function PeoplePage() {
         />
         <h3 className="mt-8">Note a clearance</h3>
         <p className="mt-1">Only the last day is kept; what was found in a check is not.</p>
-        <ActionForm action={changeClearanceAction} submit="Save" look="second">
+        <ActionForm action={changeClearanceAction} submit="Save" look="second" scope="clearance">
           <SelectField name="personId" label="Person" empty="Choose a person" choices={helpers.map((person) => ({ value: person.id, label: person.name }))} />
           <TextField name="clearedUntil" label="Cleared to" isShort hint="Year, month and day. Empty: not cleared." />
         </ActionForm>
       </section>
       <section aria-labelledby="invite" className="mt-14">
         <h2 id="invite">Invite somebody</h2>
-        <ActionForm action={inviteAction} submit="Send the invitation">
+        <ActionForm action={inviteAction} submit="Send the invitation" scope="invite">
           <TextField name="name" label="Name" />
           <TextField name="email" label="E-mail address" type="email" spellCheck={false} />
           <Choices name="role" legend="What will they do?" pick="one" choices={mayGive} />
         </ActionForm>
       </section>
+      {hasRole(actor, "admin") && (
+        <section aria-labelledby="take" className="mt-14">
+          <h2 id="take">Take a role away</h2>
+          <p className="mt-1">The person is signed out everywhere at once. What they did stays.</p>
+          <ActionForm action={takeRoleAction} submit="Take it away" look="stop" scope="take">
+            <SelectField name="personId" label="Person" empty="Choose a person" choices={people.map((person) => ({ value: person.id, label: person.name }))} />
+            <SelectField name="role" label="Role" empty="Choose a role" choices={roles.map((role) => ({ value: role, label: role }))} />
+          </ActionForm>
+        </section>
+      )}
       <section aria-labelledby="all" className="mt-14">
         <h2 id="all">All accounts</h2>
         <ul className="lines mt-3">

@@ -1,7 +1,7 @@
 "use server";
 
 import { addChild } from "@/lib/families/add-child";
-import { writeProfile } from "@/lib/families/write-profile";
+import { writeProfile } from "@/lib/registrations/write-profile";
 import { formAction } from "@/lib/web/form-action";
 import { safeBack } from "@/lib/web/safe-back";
 import { pathTo } from "@/lib/web/paths";
@@ -14,5 +14,5 @@ export const addChildAction = formAction(addChild, {
 });
 
 export const writeProfileAction = formAction(writeProfile, {
-  next: ({ nameUsed }) => ({ say: `Saved. From now on this is what we plan ${nameUsed}'s days with.` }),
+  next: ({ nameUsed }) => ({ say: `Saved. We plan ${nameUsed}'s outings with this from now on, those already registered too.` }),
 });

@@ -1,11 +1,13 @@
-import type { Metadata } from "next";
+import type { Metadata, Route } from "next";
+import Link from "next/link";
+import { printRosterAction } from "@/app/print-roster-action";
 import { RosterPapers } from "@/components/outings/roster-papers";
 import { PageHeading } from "@/components/ui/page-heading";
 import { showMe } from "@/lib/people/show-me";
 import { listPapers } from "@/lib/roster/list-papers";
 import { totalsInWords, type RosterFacts } from "@/lib/roster/roster-facts";
 import { ask } from "@/lib/web/ask";
-import { printRosterAction } from "./actions";
+import { pathTo } from "@/lib/web/paths";
 
 export const metadata: Metadata = { title: "Your day" };
 
@@ -21,6 +23,9 @@ export default async function FieldDayPage({ params }: Props) {
       <section aria-labelledby="roster" className="mt-8">
         <h2 id="roster">Roster</h2>
         <p className="mt-2 font-bold">{totalsInWords(facts)}</p>
+        <p className="mt-2">
+          <Link href={`${pathTo.fieldDay(slug)}/contacts` as Route}>Whom to call and who may collect</Link>
+        </p>
         <RosterOnScreen facts={facts} />
       </section>
       <section aria-labelledby="papers" className="mt-12">

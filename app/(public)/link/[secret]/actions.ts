@@ -4,12 +4,13 @@ import { answerByLink } from "@/lib/helpers/answer-request";
 import { acceptInvitation } from "@/lib/people/accept-invitation";
 import { followMailLink } from "@/lib/people/follow-mail-link";
 import { formAction } from "@/lib/web/form-action";
+import { safeBack } from "@/lib/web/safe-back";
 import { startSession } from "@/lib/web/session";
 
 export const followLinkAction = formAction(followMailLink, {
-  next: async ({ personId }) => {
+  next: async ({ personId, back }) => {
     await startSession(personId);
-    return { to: "/account" };
+    return { to: safeBack(back) };
   },
 });
 

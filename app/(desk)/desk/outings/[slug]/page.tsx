@@ -67,8 +67,8 @@ export default async function OutingDeskPage({ params }: Props) {
               <br />
               <Link href={pathTo.outing(slug)}>See its public page</Link>
             </p>
-            {(outing.state === "draft" || outing.state === "closed") && <ActionForm action={publishOutingAction} submit={outing.state === "draft" ? "Publish" : "Open again"} carry={{ slug }} answer="below" />}
-            {outing.state === "open" && <ActionForm action={closeOutingAction} submit="Close registration" look="second" carry={{ slug }} answer="below" />}
+            {/* One form in all three states, so that what it answers is still there when the state has changed. */}
+            {isLive && <ActionForm {...opening[outing.state]} carry={{ slug }} answer="below" />}
           </section>
           <section className="panel" aria-labelledby="where">
             <h2 id="where" className="text-[1.2rem]">
@@ -114,6 +114,13 @@ function deliveriesInWords(deliveries: { state: string }[]): string {
   if (deliveries.length === 0) return "None yet.";
   return sent === deliveries.length ? `All ${sent} are sent.` : `${sent} of ${deliveries.length} are sent.`;
 }
+
+const closing = { action: closeOutingAction, submit: "Close registration", look: "second" } as const;
+const opening = {
+  draft: { action: publishOutingAction, submit: "Publish" },
+  open: closing,
+  closed: { action: publishOutingAction, submit: "Open again" },
+} as const;
 
 const marks: Record<ReadinessState, { kind: StateKind; look: string; word: string }> = {
   ready: { kind: "good", look: "good", word: "Ready." },

@@ -51,13 +51,12 @@ export const askAboutPaymentAction = formAction(showCheckout, {
     const answer = sessionId ? await gateway().lookUp(sessionId) : "not paid";
     if (answer === null) return { say: "The payment service does not answer just now. Your seat stays held; try again in a few minutes." };
     if (answer === "not paid") return { say: "The payment service has no payment for this seat yet. You can go back to the payment page, or choose again." };
-    await takeCheckoutEvent(systemContext(payments), answer);
-    return { say: "The payment has arrived. Thank you." };
+    const taken = await takeCheckoutEvent(systemContext(payments), answer);
+    const arrived = taken.ok && (taken.value === "settled" || taken.value === "seen before");
+    return { say: arrived ? "The payment has arrived. Thank you." : "A payment has arrived, but not as we expected it. Nothing is lost: call us and we put it right." };
   },
 });
 
 export const withdrawAction = formAction(withdraw, {
-  next: ({ nameUsed, title, paid }) => ({
-    say: `${nameUsed} is withdrawn from ${title}.${paid ? " We give back what you paid; it takes a few days." : ""} You can register again as long as there is room.`,
-  }),
+  next: ({ registrationId }) => ({ to: pathTo.registration(registrationId) }),
 });

@@ -1,9 +1,11 @@
 import type { Metadata } from "next";
 import Link from "next/link";
 import { ActionForm } from "@/components/forms/action-form";
+import { Tick } from "@/components/forms/tick";
 import { StateMark } from "@/components/ui/state-mark";
 import { PageHeading } from "@/components/ui/page-heading";
 import { Verdict } from "@/components/ui/verdict";
+import { WrittenText } from "@/components/ui/written-text";
 import type { StateKind } from "@/components/ui/state-mark";
 import type { Step } from "@/lib/registrations/registration";
 import type { RegistrationView } from "@/lib/registrations/registration-view";
@@ -31,7 +33,7 @@ export default async function RegistrationPage({ params }: Props) {
     <>
       <PageHeading title={`${child.nameUsed}: ${outing.title}`} crumbs={[{ href: "/family", text: "Your family" }]} facts={outing.whenAndWhere} />
       <Verdict kind={verdictKind(registration)} sentence={registration.stateInWords}>
-        {registration.state === "held" && nextStep && (
+        {registration.isOn && registration.state === "held" && nextStep && (
           <>
             <p>
               {stepsLeft.length} of 3 {stepsLeft.length === 1 ? "steps is" : "steps are"} left. The seat is yours when all three are done.
@@ -45,27 +47,49 @@ export default async function RegistrationPage({ params }: Props) {
         )}
         {registration.state === "withdrawn" && outing.takesRegistrations && (
           <p>
+            {registration.fee.state === "settled" && registration.fee.amount !== "$0" ? `We give back ${registration.fee.amount}; it takes a few days. ` : ""}
             What you wrote is kept. <Link href={pathTo.registering(outing.slug)}>Register again</Link>
           </p>
         )}
-        {registration.state === "confirmed" && <p>We have sent you a mail with the meeting point and a calendar file. Nothing else is needed until the day.</p>}
+        {registration.isOn && registration.state === "confirmed" && <p>We have sent you a mail with the meeting point and a calendar file. Nothing else is needed until the day.</p>}
       </Verdict>
-      <h2 className="mt-8 mb-3">The three steps</h2>
-      <ol className="lines">
-        {(["needs", "waiver", "fee"] as const).map((step) => (
-          <StepLine key={step} step={step} registration={registration} />
-        ))}
-      </ol>
-      <section aria-labelledby="leave" className="mt-14">
-        <h2 id="leave">Not coming after all?</h2>
-        <p className="mt-2">No reason needed. The seat goes to the next family on the list.</p>
-        <ActionForm action={withdrawAction} submit={`Withdraw ${child.nameUsed}`} look="stop" carry={{ registrationId: id }} answer="below" />
-      </section>
+      {registration.isOn && (
+        <>
+          <h2 className="mt-8 mb-3">The three steps</h2>
+          <ol className="lines">
+            {(["needs", "waiver", "fee"] as const).map((step) => (
+              <StepLine key={step} step={step} registration={registration} />
+            ))}
+          </ol>
+          {registration.meetingText && (
+            <section aria-labelledby="where" className="mt-12">
+              <h2 id="where" className="mb-3">
+                Where to meet
+              </h2>
+              <WrittenText text={registration.meetingText} />
+            </section>
+          )}
+          <Leaving id={id} nameUsed={child.nameUsed} />
+        </>
+      )}
     </>
   );
 }
 
-function verdictKind({ state }: RegistrationView): StateKind {
+function Leaving({ id, nameUsed }: { id: string; nameUsed: string }) {
+  return (
+      <section aria-labelledby="leave" className="mt-14">
+        <h2 id="leave">Not coming after all?</h2>
+        <p className="mt-2">No reason needed. The seat goes to the next family on the list.</p>
+        <ActionForm action={withdrawAction} submit={`Withdraw ${nameUsed}`} look="stop" carry={{ registrationId: id }}>
+          <Tick name="sure" label="Yes, give the seat back" />
+        </ActionForm>
+      </section>
+  );
+}
+
+function verdictKind({ state, isOn }: RegistrationView): StateKind {
+  if (!isOn) return "off";
   if (state === "confirmed") return "good";
   if (state === "held") return "you";
   return state === "waiting" ? "wait" : "off";

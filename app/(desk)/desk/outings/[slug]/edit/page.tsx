@@ -17,7 +17,7 @@ export default async function EditOutingPage({ params }: Props) {
       <PageHeading
         title="Change the outing"
         crumbs={[{ href: "/desk", text: "Desk" }, { href: pathTo.deskOuting(slug), text: form.values?.title ?? slug }]}
-        facts="Families and chaperones who come read the new text at once; send the meeting point again after changing it."
+        facts="If the day, the hours, the site or the meeting point change, everybody who comes is told by mail."
       />
       <OutingForm {...form} requestId="" />
     </>

@@ -1,11 +1,11 @@
 import type { Metadata } from "next";
+import { printRosterAction } from "@/app/print-roster-action";
 import { DeskRooms } from "@/components/outings/desk-rooms";
 import { RosterPapers } from "@/components/outings/roster-papers";
 import { PageHeading } from "@/components/ui/page-heading";
 import { listPapers } from "@/lib/roster/list-papers";
 import { ask } from "@/lib/web/ask";
 import { pathTo } from "@/lib/web/paths";
-import { printRosterAction } from "./actions";
 
 export const metadata: Metadata = { title: "Papers" };
 

@@ -15,7 +15,7 @@ type Props = { registrationId: string; nameUsed: string; profile: AccessProfile 
 export function NeedsForm({ registrationId, nameUsed, profile, guardianStays, thisTime }: Props) {
   return (
     <GuidedForm action={confirmNeedsAction} schema={confirmNeedsSchema} submit={profile ? "Still right: send this" : "Send this"} carry={{ registrationId }}>
-      <FormPart title="This outing" seenBy="the coordinator and the leader">
+      <FormPart title="This outing" seenBy="the coordinator">
         <Choices
           name="guardianStays"
           legend="What will you do on the day?"

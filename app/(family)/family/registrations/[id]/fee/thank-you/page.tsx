@@ -30,6 +30,11 @@ export default async function ThankYouPage({ params }: Props) {
       ) : (
         <>
           <Verdict kind="wait" sentence="We are waiting for the payment service to tell us about the payment.">
+            {fee.checkoutUrl && (
+              <p>
+                Not paid yet? <a href={fee.checkoutUrl}>Go back to the payment page</a>
+              </p>
+            )}
             <p>This takes a few seconds as a rule. {child.nameUsed}&rsquo;s seat stays held. You may leave this page: we write to you as soon as it is settled.</p>
           </Verdict>
           <ActionForm action={askAboutPaymentAction} submit="Ask the payment service now" look="second" carry={{ registrationId: id }} />
