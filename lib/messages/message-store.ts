@@ -138,3 +138,8 @@ export function retryMessages(conn: Connection, now: string): number {
 export function listStatesByKey(conn: Connection, keys: string[]): DeliveryView["state"][] {
   return conn.all(knex("messages").whereIn("once_key", keys).select("state")).map((row) => row.state);
 }
+
+/** What has not gone out yet about an outing is not sent any more, since it is no longer true. */
+export function cancelQueued(conn: Connection, outingId: string): void {
+  conn.run(knex("messages").where({ outing_id: outingId, state: "queued" }).update({ state: "cancelled" }));
+}

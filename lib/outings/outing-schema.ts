@@ -5,8 +5,10 @@ import { listOf } from "@/lib/shared/typed";
 
 const day = z.string().trim().refine(isDay, "Enter a date as year, month and day, such as 2027-01-09.");
 const clock = z.string().trim().refine(isClockTime, "Enter a time on the 24-hour clock, such as 09:00 or 15:30.");
-const line = (what: string, most: number) =>
+const text = (what: string, most: number) =>
   z.string().trim().min(1, `Enter ${what}.`).max(most, `Shorten ${what} to ${most} letters or fewer.`);
+/** One line: it stands in headings and in the subjects of mails. */
+const line = (what: string, most: number) => text(what, most).refine((typed) => !/\p{Cc}/u.test(typed), `Write ${what} on one line.`);
 const whole = (what: string, least: number, most: number) =>
   z.coerce
     .number(`Enter ${what} as a number.`)
@@ -27,7 +29,7 @@ export const amountTyped = z
 const outingFields = {
   title: line("a title", 100),
   theme: line("the sound or theme of the day", 120),
-  summary: line("what the day is like", 2000),
+  summary: text("what the day is like", 2000),
   siteId: z.string().min(1, "Choose a site."),
   day,
   startTime: clock,
@@ -37,7 +39,7 @@ const outingFields = {
   oldestAge: whole("the oldest age", 3, 21),
   suggestedFee: amountTyped.refine((cents) => cents === 0 || cents >= 50, "Enter 0, or 0.50 dollars or more: a card payment cannot be smaller."),
   policyId: z.string().min(1, "Choose a policy."),
-  meetingText: line("the meeting-point instructions", 6000),
+  meetingText: text("the meeting-point instructions", 6000),
   modelIds: listOf(z.string().max(60)),
 };
 

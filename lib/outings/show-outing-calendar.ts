@@ -1,5 +1,6 @@
 import ical, { ICalCalendarMethod, ICalEventStatus } from "ical-generator";
 import { publicAddress } from "@/lib/shared/addresses";
+import { env } from "@/lib/shared/env";
 import { ok } from "@/lib/shared/outcome";
 import { defineQuery } from "@/lib/shared/use-case";
 import { isPublic, type Outing } from "./outing";
@@ -34,8 +35,15 @@ export function calendarOf(outing: Outing, now: string, description = outing.mee
     summary: outing.title,
     location: outing.site.name,
     description,
+    organizer: organizer(),
     url: publicAddress(`/outings/${outing.slug}`),
     status: isOff ? ICalEventStatus.CANCELLED : ICalEventStatus.CONFIRMED,
   });
   return `${calendar.toString()}\r\n`;
+}
+
+/** RFC 5546, 3.2, wants to know who publishes or cancels an event: the programme, by the address its mail comes from. */
+function organizer(): { name: string; email: string } {
+  const { PROGRAMME_NAME, MAIL_FROM } = env();
+  return { name: PROGRAMME_NAME, email: /<([^>]+)>/.exec(MAIL_FROM)?.[1] ?? MAIL_FROM };
 }

@@ -1,7 +1,6 @@
 import { findOuting } from "@/lib/outings/outing-store";
 import { findRegistration } from "@/lib/registrations/registration-store";
-import { minutesLater } from "@/lib/shared/dates";
-import { holdMinutes } from "@/lib/registrations/registration";
+import { holdEnd } from "@/lib/registrations/registration";
 import { holdSeat, joinQueue } from "@/lib/registrations/seat-store";
 import { confirmIfComplete, settleSeats } from "@/lib/registrations/settle-seats";
 import type { Connection } from "@/db/connection";
@@ -22,7 +21,7 @@ export const takeCheckoutEvent = defineCommand({
   run: ({ conn, now, input, found: { payment } }) => {
     if (!noteEvent(conn, now, { id: input.eventId, type: input.eventType })) return ok<EventAnswer>("seen before");
     if (!payment) return ok<EventAnswer>("not ours");
-    if (payment.state === "settled") return ok<EventAnswer>("seen before");
+    if (payment.state === "settled" || payment.state === "returned") return ok<EventAnswer>("seen before");
     if (payment.amount_cents !== input.amountCents || payment.currency !== input.currency) {
       log.error({ paymentId: payment.id, told: input.amountCents, asked: payment.amount_cents }, "a payment came with another amount");
       noteExtraPayment(conn, now, payment.id, input.paymentIntentId);
@@ -51,7 +50,7 @@ function seatForPayment(conn: Connection, now: string, registrationId: string): 
   const outing = findOuting(conn, { id: registration.outing.id }, now);
   if (!outing || outing.state === "called off" || outing.endsAt <= now) return;
   settleSeats(conn, now, outing);
-  if (holdSeat(conn, now, outing.id, registrationId, minutesLater(now, holdMinutes))) {
+  if (holdSeat(conn, now, outing.id, registrationId, holdEnd(now, outing.startsAt))) {
     confirmIfComplete(conn, now, registrationId);
     return;
   }

@@ -1,4 +1,4 @@
-import { queueMessage } from "@/lib/messages/message-store";
+import { cancelQueued, queueMessage } from "@/lib/messages/message-store";
 import { publicOutingFacts } from "@/lib/outings/outing-facts";
 import { mayPlanOutings } from "@/lib/outings/outing-policy";
 import { callOffSchema } from "@/lib/outings/outing-schema";
@@ -18,6 +18,7 @@ export const callOffOuting = defineCommand({
     if (outing.endsAt <= now) return conflict("over", "This outing is over and cannot be called off.");
     const wasPublic = outing.state !== "draft";
     setOutingState(conn, now, outing.id, "called off", input.because);
+    cancelQueued(conn, outing.id);
     const addressees = wasPublic ? addresseesOf(conn, now, outing) : [];
     const calendar = calendarOf({ ...outing, state: "called off", edition: outing.edition + 1 }, now);
     for (const person of addressees) {

@@ -7,10 +7,10 @@ import type { Participant } from "@/lib/families/participant";
 import { queueMessage } from "@/lib/messages/message-store";
 import { isSignedIn, personIdOf, type SignedIn } from "@/lib/shared/actor";
 import type { Connection } from "@/db/connection";
-import { ageOn, minutesLater } from "@/lib/shared/dates";
+import { ageOn } from "@/lib/shared/dates";
 import { conflict, forbidden, invalid, ok } from "@/lib/shared/outcome";
 import { defineCommand } from "@/lib/shared/use-case";
-import { holdMinutes, isLive } from "./registration";
+import { holdEnd, isLive } from "./registration";
 import { mayRegister } from "./registration-policy";
 import { registerChildSchema } from "./registration-schema";
 import { findRegistration, findRegistrationOfChild, insertRegistration } from "./registration-store";
@@ -48,7 +48,7 @@ export const registerChild = defineCommand({
 function seatOrQueue(conn: Connection, now: string, given: { id: string; outing: Outing; actor: SignedIn }): "held" | "waiting" | "confirmed" {
   const { id, outing, actor } = given;
   const nobodyWaits = firstInQueue(conn, outing.id) === null;
-  if (nobodyWaits && holdSeat(conn, now, outing.id, id, holdEnd(now, outing))) {
+  if (nobodyWaits && holdSeat(conn, now, outing.id, id, holdEnd(now, outing.startsAt))) {
     return confirmIfComplete(conn, now, id) ? "confirmed" : "held";
   }
   joinQueue(conn, now, id);
@@ -65,11 +65,6 @@ function seatOrQueue(conn: Connection, now: string, given: { id: string; outing:
     outingId: outing.id,
   });
   return "waiting";
-}
-
-function holdEnd(now: string, outing: Outing): string {
-  const end = minutesLater(now, holdMinutes);
-  return end < outing.startsAt ? end : outing.startsAt;
 }
 
 function ageRefusal(outing: Outing, participant: Participant): string | null {

@@ -1,3 +1,5 @@
+import { minutesLater } from "@/lib/shared/dates";
+
 export type RegistrationState = "held" | "waiting" | "confirmed" | "withdrawn" | "turned away";
 
 /** A seat is held this long while the form is finished; starting to pay holds it for at least this long again. */
@@ -6,6 +8,12 @@ export const holdMinutes = 45;
 export const checkoutMinutes = 31;
 /** Who comes up from the waiting list has two days to take the seat, or until the outing begins. */
 export const offerMinutes = 48 * 60;
+
+/** When a hold that begins now ends: never after the outing begins. */
+export function holdEnd(now: string, startsAt: string): string {
+  const end = minutesLater(now, holdMinutes);
+  return end < startsAt ? end : startsAt;
+}
 
 export const guardianPlans = ["drops off", "stays", "helps"] as const;
 export type GuardianPlan = (typeof guardianPlans)[number];

@@ -37,7 +37,7 @@ export async function registerWholly(story: Story, going: Going, told: DemoRegis
 type Registered = { registrationId: string; child: SeededChild; at: string };
 
 export async function giveSeatBack(story: Story, { registrationId, child, at }: Registered): Promise<void> {
-  must(await withdraw({ conn: story.conn, actor: child.guardian, now: at }, { registrationId }));
+  must(await withdraw({ conn: story.conn, actor: child.guardian, now: at }, { registrationId, sure: "yes" }));
   await sendPost(story, at);
 }
 

@@ -48,6 +48,7 @@ const familyPages: Visit[] = [
 const helperPages: Visit[] = [
   { name: "helping", path: fixed("/helping"), as: "chaperone" },
   { name: "the days of a leader", path: fixed("/field"), as: "leader" },
+  { name: "whom a leader calls", path: fixed(`/field/${spit}/contacts`), as: "leader" },
   { name: "a day of a leader", path: fixed(`/field/${spit}`), as: "leader" },
 ];
 
@@ -59,6 +60,7 @@ const deskPages: Visit[] = [
   { name: "the adults of an outing", path: fixed(`/desk/outings/${spit}/helpers`), as: "coordinator" },
   { name: "the cover of an outing", path: fixed(`/desk/outings/${spit}/cover`), as: "coordinator" },
   { name: "the papers of an outing", path: fixed(`/desk/outings/${spit}/papers`), as: "coordinator" },
+  { name: "whom to call, at the desk", path: fixed(`/desk/outings/${spit}/contacts`), as: "coordinator" },
   { name: "changing an outing", path: fixed(`/desk/outings/${spit}/edit`), as: "coordinator" },
   { name: "the mails", path: fixed("/desk/messages"), as: "coordinator" },
   { name: "the sites", path: fixed("/desk/sites"), as: "coordinator" },

@@ -28,12 +28,6 @@ export function demoPerson(role: Role, ground: Ground = place()): SignedIn {
   return known(person && actorOf(conn, person.id), role);
 }
 
-export function demoPersonNamed(email: string): SignedIn {
-  const conn = databaseOf();
-  const person = findPersonByEmail(conn, email);
-  return known(person && actorOf(conn, person.id), email);
-}
-
 /** Somebody of this test's own, with an address nobody else has. */
 export function somebody(name: string, role: Role, ground: Ground = place()): SignedIn {
   const conn = databaseOf(ground);

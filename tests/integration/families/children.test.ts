@@ -70,15 +70,19 @@ describe("an access profile", () => {
     expect(kept.map((row) => (JSON.parse(row.answers) as typeof profile).support)).toEqual(["occasional", "constant"]);
   });
 
-  it("that a registration relied on stays as it was when the family changes it later", async () => {
+  it("that is changed later is what the outings to come are planned with; a day that is past keeps what it had", async () => {
     const world = makeWorld();
     const family = makeFamily(world);
     const { registrationId } = await register(world, family, makeOuting(world).slug);
     await allowed(world, family.guardian, confirmNeeds, { ...typedProfile, registrationId, guardianStays: "stays", thisTime: "a cold" });
-    await allowed(world, family.guardian, writeProfile, { ...typedProfile, participantId: family.childId, support: "constant" });
-    const { profileId, thisTime } = registrationOf(world, registrationId);
-    expect(profileId && findProfile(world.conn, profileId)?.support).toBe("occasional");
-    expect(thisTime).toBe("a cold");
+    const supportOf = () => findProfile(world.conn, registrationOf(world, registrationId).profileId ?? "")?.support;
+    const change = (support: string) => allowed(world, family.guardian, writeProfile, { ...typedProfile, participantId: family.childId, support });
+    await change("close");
+    expect(supportOf()).toBe("close");
+    expect(registrationOf(world, registrationId).thisTime).toBe("a cold");
+    world.now = "2027-01-09T20:00:00.000Z";
+    await change("constant");
+    expect(supportOf()).toBe("close");
   });
 
   it("asks for the chair's particulars with a wheelchair only, and forgets them without one", async () => {

@@ -55,60 +55,91 @@ export function settle(model: SeatModel, now: string): void {
   }
 }
 
+const earlier = (one: string, other: string) => (one < other ? one : other);
+
+/** What is tried with the seats brought up to now; refused, it leaves everything as it was, the lapsed holds too. */
+function attempt(model: SeatModel, now: string, work: (draft: SeatModel) => boolean): void {
+  const draft = structuredClone(model);
+  settle(draft, now);
+  if (work(draft)) Object.assign(model, draft);
+}
+
+const isLive = ({ state }: Note) => state === "held" || state === "waiting" || state === "confirmed";
+
 export function registers(model: SeatModel, child: number, now: string): void {
-  settle(model, now);
-  const note = noteOf(model, child);
-  if (note.state === "held" || note.state === "waiting" || note.state === "confirmed") return;
-  seatOrQueue(model, child, now);
+  attempt(model, now, (draft) => {
+    if (!isLive(noteOf(draft, child))) seatOrQueue(draft, child, now);
+    return true;
+  });
 }
 
 function seatOrQueue(model: SeatModel, child: number, now: string): void {
-  if (model.queue.length === 0 && freeSeats(model) > 0) return hold(model, child, minutesLater(now, holdMinutes));
+  if (model.queue.length === 0 && freeSeats(model) > 0) {
+    return hold(model, child, earlier(minutesLater(now, holdMinutes), model.startsAt));
+  }
   noteOf(model, child).state = "waiting";
   model.queue.push(child);
 }
 
 export function withdraws(model: SeatModel, child: number, now: string): void {
   const note = noteOf(model, child);
-  if (note.state === "none" || note.state === "withdrawn") return;
+  if (!isLive(note)) return;
   note.state = "withdrawn";
   model.queue = model.queue.filter((one) => one !== child);
   for (const page of note.pages) page.live = false;
   settle(model, now);
 }
 
-export function saysNeeds(model: SeatModel, child: number): void {
-  const note = noteOf(model, child);
-  if (note.state === "none" || note.state === "withdrawn") return;
-  note.needs = true;
-  complete(note);
+export function saysNeeds(model: SeatModel, child: number, now: string): void {
+  if (noteOf(model, child).state === "none") return;
+  attempt(model, now, (draft) => {
+    const note = noteOf(draft, child);
+    if (!isLive(note)) return false;
+    note.needs = true;
+    complete(note);
+    return true;
+  });
 }
 
-export function signs(model: SeatModel, child: number): void {
-  const note = noteOf(model, child);
-  if (note.state === "none" || note.state === "withdrawn") return;
-  note.signed = true;
-  complete(note);
+export function signs(model: SeatModel, child: number, now: string): void {
+  if (noteOf(model, child).state === "none") return;
+  attempt(model, now, (draft) => {
+    const note = noteOf(draft, child);
+    if (!note.signed && !isLive(note)) return false;
+    note.signed = true;
+    complete(note);
+    return true;
+  });
 }
 
-export function takesNoFee(model: SeatModel, child: number): void {
-  const note = noteOf(model, child);
-  if (note.state !== "held" || note.feeSettled) return;
-  for (const page of note.pages) page.live = false;
-  note.feeSettled = true;
-  complete(note);
+export function takesNoFee(model: SeatModel, child: number, now: string): void {
+  if (noteOf(model, child).state === "none") return;
+  attempt(model, now, (draft) => {
+    const note = noteOf(draft, child);
+    if (note.feeSettled) return true;
+    if (note.state !== "held") return false;
+    for (const page of note.pages) page.live = false;
+    note.feeSettled = true;
+    complete(note);
+    return true;
+  });
 }
 
 /** A new page for this amount, unless the last one is still open for the same. */
 export function opensPage(model: SeatModel, child: number, amountCents: number, now: string): void {
-  const note = noteOf(model, child);
-  if (note.state !== "held" || note.feeSettled) return;
-  const last = note.pages.find((page) => page.live);
-  if (last && last.amountCents === amountCents && minutesLater(last.openedAt, checkoutMinutes - 5) > now) return;
-  if (last) last.live = false;
-  note.pages.push({ amountCents, openedAt: now, live: true, paid: false });
-  const until = minutesLater(now, checkoutMinutes + 5);
-  if (note.until < until) note.until = until;
+  if (noteOf(model, child).state === "none") return;
+  attempt(model, now, (draft) => {
+    const note = noteOf(draft, child);
+    if (note.feeSettled) return true;
+    if (note.state !== "held") return false;
+    const last = note.pages.find((page) => page.live);
+    if (last && last.amountCents === amountCents && minutesLater(last.openedAt, checkoutMinutes - 5) > now) return true;
+    if (last) last.live = false;
+    note.pages.push({ amountCents, openedAt: now, live: true, paid: false });
+    const until = earlier(minutesLater(now, checkoutMinutes + 5), draft.startsAt);
+    if (note.until < until) note.until = until;
+    return true;
+  });
 }
 
 /** Money comes for one of the pages, whatever has become of it meanwhile. */
@@ -124,7 +155,5 @@ export function pays(model: SeatModel, child: number, at: number, now: string): 
   complete(note);
   if (note.state !== "withdrawn") return;
   settle(model, now);
-  if (freeSeats(model) > 0) return hold(model, child, minutesLater(now, holdMinutes));
-  note.state = "waiting";
-  model.queue.push(child);
+  seatOrQueue(model, child, now);
 }

@@ -50,15 +50,15 @@ async function step(one: Try, pick: (below: number) => number): Promise<string> 
       return `${child} withdraws`;
     case 3:
       await ask(world, guardian, confirmNeeds, { ...typedProfile, registrationId, guardianStays: "stays" });
-      model.saysNeeds(expected, child);
+      model.saysNeeds(expected, child, world.now);
       return `${child} says needs`;
     case 4:
       await ask(world, guardian, signWaiver, signature(world, registrationId));
-      model.signs(expected, child);
+      model.signs(expected, child, world.now);
       return `${child} signs`;
     case 5:
       await ask(world, guardian, chooseFee, { registrationId, choice: "no fee" });
-      model.takesNoFee(expected, child);
+      model.takesNoFee(expected, child, world.now);
       return `${child} takes a no-fee place`;
     case 6:
       return opensPage(one, child, registrationId, amounts[pick(2)] ?? 1200);

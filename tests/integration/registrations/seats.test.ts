@@ -177,6 +177,14 @@ describe("giving a seat back", () => {
     world.now = "2027-01-09T20:00:00.000Z";
     expect(await refused(world, family.guardian, withdraw, { registrationId, sure: "yes" })).toMatchObject({ kind: "conflict", code: "over" });
   });
+
+  it("asks for a second look first", async () => {
+    const world = makeWorld();
+    const family = makeFamily(world);
+    const { registrationId } = await register(world, family, makeOuting(world).slug);
+    expect(await refused(world, family.guardian, withdraw, { registrationId })).toMatchObject({ fields: { sure: "Tick the box to give the seat back." } });
+    expect(registrationOf(world, registrationId).state).toBe("held");
+  });
 });
 
 describe("the number of seats", () => {

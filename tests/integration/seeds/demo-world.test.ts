@@ -294,6 +294,10 @@ describe("seeding", () => {
       STRIPE_SECRET_KEY: "sk_live_of_nobody",
       STRIPE_WEBHOOK_SECRET: "whsec_of_nobody",
       SMTP_URL: "smtp://mail.saltgrass.example:25",
+      PUBLIC_URL: "https://outings.saltgrass.example",
+      MAIL_FROM: "outings@saltgrass.example",
+      PROGRAMME_NAME: "Saltgrass Listening Club",
+      PROGRAMME_PHONE: "360 555 0142",
     };
     expect(run("scripts/seed.ts", databaseFile, real)).toMatchObject({
       status: 1,

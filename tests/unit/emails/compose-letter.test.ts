@@ -27,7 +27,8 @@ const facts: MessageFacts = {
   "seat-offered": { name, outing, registrationId: "r1", until: "Wednesday 6 January 2027, 10:45 a.m." },
   "asked-to-help": { name, outing, task: "chaperone", from: "Ines Amari", link },
   "meeting-point": { name, outing, task: "leader", phone: "360 555 0142", calendar },
-  "called-off": { name, outing, because: "A storm is coming.", calendar: "BEGIN:VCALENDAR" },
+  "called-off": { name, outing, because: "A storm is coming.", calendar },
+  "outing-changed": { name, outing, calendar },
 };
 
 const messages = (Object.keys(facts) as (keyof MessageFacts)[]).map((kind) => ({ kind, facts: facts[kind] }) as Message);
@@ -100,7 +101,7 @@ describe.each(messages)("the mail $kind", (message) => {
 it("a calendar file goes along where there is one", async () => {
   const withCalendar: string[] = [];
   for (const message of messages) if ((await composeLetter(message)).calendar === calendar) withCalendar.push(message.kind);
-  expect(withCalendar).toEqual(["registration-confirmed", "meeting-point"]);
+  expect(withCalendar).toEqual(["registration-confirmed", "meeting-point", "called-off", "outing-changed"]);
 });
 
 it("a no-fee place reads like a paid one, without a word about money received", async () => {

@@ -4,6 +4,7 @@ import { readEnv } from "@/lib/shared/env";
 
 const live = {
   DUNLIN_ENV: "production", STRIPE_SECRET_KEY: "sk_live_1", STRIPE_WEBHOOK_SECRET: "whsec_1", SMTP_URL: "smtps://mail.example.org:465",
+  PUBLIC_URL: "https://outings.example.org", MAIL_FROM: "Club <outings@example.org>", PROGRAMME_NAME: "Club", PROGRAMME_PHONE: "360 555 0142",
 };
 
 describe("the configuration of a production", () => {
@@ -18,6 +19,10 @@ describe("the configuration of a production", () => {
     ["SMTP_URL", "smtp://localhost:1025"],
   ])("is refused with a stand-in for %s (%s), and the refusal names it", (name, value) => {
     expect(() => readEnv({ ...live, [name]: value })).toThrow(name);
+  });
+
+  it.each(["PUBLIC_URL", "MAIL_FROM", "PROGRAMME_NAME", "PROGRAMME_PHONE"])("is refused without %s of its own", (name) => {
+    expect(() => readEnv({ ...live, [name]: undefined })).toThrow(name);
   });
 
   it("is what is meant when nothing says otherwise, so that a stand-in never slips in", () => {

@@ -11,6 +11,7 @@ import { Verdict } from "@/components/ui/verdict";
 import { WrittenText } from "@/components/ui/written-text";
 import { showOutingDesk } from "@/lib/desk/show-outing-desk";
 import { listDeliveries } from "@/lib/messages/list-deliveries";
+import type { OutingState } from "@/lib/outings/outing";
 import type { ReadinessItem, ReadinessState } from "@/lib/readiness/readiness";
 import { listOutingPeople } from "@/lib/registrations/list-outing-people";
 import { ask } from "@/lib/web/ask";
@@ -68,7 +69,7 @@ export default async function OutingDeskPage({ params }: Props) {
               <Link href={pathTo.outing(slug)}>See its public page</Link>
             </p>
             {/* One form in all three states, so that what it answers is still there when the state has changed. */}
-            {isLive && <ActionForm {...opening[outing.state]} carry={{ slug }} answer="below" />}
+            {isLive && <ActionForm {...openingOf(outing.state)} carry={{ slug }} answer="below" />}
           </section>
           <section className="panel" aria-labelledby="where">
             <h2 id="where" className="text-[1.2rem]">
@@ -115,12 +116,10 @@ function deliveriesInWords(deliveries: { state: string }[]): string {
   return sent === deliveries.length ? `All ${sent} are sent.` : `${sent} of ${deliveries.length} are sent.`;
 }
 
-const closing = { action: closeOutingAction, submit: "Close registration", look: "second" } as const;
-const opening = {
-  draft: { action: publishOutingAction, submit: "Publish" },
-  open: closing,
-  closed: { action: publishOutingAction, submit: "Open again" },
-} as const;
+function openingOf(state: OutingState) {
+  if (state === "open") return { action: closeOutingAction, submit: "Close registration", look: "second" } as const;
+  return { action: publishOutingAction, submit: state === "draft" ? "Publish" : "Open again" } as const;
+}
 
 const marks: Record<ReadinessState, { kind: StateKind; look: string; word: string }> = {
   ready: { kind: "good", look: "good", word: "Ready." },
