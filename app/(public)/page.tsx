@@ -47,7 +47,7 @@ export default async function HomePage() {
           <li>Everybody gets a count-off number. We count with voices at every stop, so that a blind leader and a sighted one know the same thing.</li>
           <li>We listen, without talking, for a minute at a time. Then we tell each other what we heard.</li>
           <li>We touch a teaching model of that sound: left to right is time, low to high is pitch, and higher under the finger is louder.</li>
-          <li>Who likes, records. Who likes, rests. A guide is there when wanted, on the side you choose.</li>
+          <li>Record if you like, rest if you like. A guide is there when you want one, on the side you choose.</li>
           <li>We hand each child over to somebody on the family&rsquo;s own list.</li>
         </ol>
         <p className="mt-4">

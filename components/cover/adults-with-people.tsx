@@ -1,4 +1,4 @@
-type Adult = { id: string; name: string; role: string; abilities: string; standing: string; share: number[] };
+type Adult = { id: string; name: string; role: string; abilities: string; counts: boolean; standing: string; share: number[] };
 type Person = { id: string; number: number | null; nameUsed: string; adultId: string | null };
 
 /** Adults and the people with them. The bar shows how much of one adult they take; the words beside it say the same. */
@@ -14,7 +14,7 @@ export function AdultsWithPeople({ adults, people }: { adults: Adult[]; people: 
             <p className="text-quiet">{alone.length === 1 ? "1 person" : `${alone.length} people`}</p>
           </div>
           <div>
-            <People people={alone} isWanting />
+            <People people={alone} isWanting nobody="" />
           </div>
         </section>
       )}
@@ -29,7 +29,7 @@ export function AdultsWithPeople({ adults, people }: { adults: Adult[]; people: 
             <Load share={adult.share} />
           </div>
           <div>
-            <People people={people.filter((person) => person.adultId === adult.id)} />
+            <People people={people.filter((person) => person.adultId === adult.id)} nobody={adult.counts ? "Nobody paired. Free for the group." : "Nobody paired."} />
           </div>
         </section>
       ))}
@@ -37,8 +37,8 @@ export function AdultsWithPeople({ adults, people }: { adults: Adult[]; people: 
   );
 }
 
-function People({ people, isWanting = false }: { people: Person[]; isWanting?: boolean }) {
-  if (people.length === 0) return <p className="text-quiet">Nobody paired. Free for the group.</p>;
+function People({ people, nobody, isWanting = false }: { people: Person[]; nobody: string; isWanting?: boolean }) {
+  if (people.length === 0) return <p className="text-quiet">{nobody}</p>;
   return (
     <ul className="flex flex-wrap gap-2.5">
       {people.map((person) => (

@@ -36,6 +36,7 @@ export const checkOutingCover = defineQuery({
         role: adult.role,
         abilities: abilitiesInWords(answers.find((answer) => answer.personId === adult.id)?.record ?? null),
         clearedUntil: adult.clearedUntil,
+        counts: verdict.adults.some((one) => one.adultId === adult.id && one.standing !== "does-not-count"),
         standing: verdict.adults.find((one) => one.adultId === adult.id)?.sentence ?? "",
         share: shareOf(people.filter((person) => person.adultId === adult.id).map((person) => person.support), input.policy.supportRatios),
       }));
