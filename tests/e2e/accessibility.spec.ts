@@ -20,6 +20,15 @@ test.describe("every page, in each theme", () => {
     });
   }
 
+  test("a month on a narrow screen is a list of links, free of what axe finds, and fits 320 pixels", async ({ open }) => {
+    const page = await open(null, { viewport: { width: 320, height: 800 } });
+    await page.goto("/outings");
+    await page.getByRole("button", { name: "Show as a month grid" }).click();
+    await expect(page.getByRole("status").filter({ hasText: "this month" })).toBeVisible();
+    await expect(page.getByRole("grid")).toHaveCount(0);
+    await expectAccessible(page);
+  });
+
   for (const visit of registrationVisits) {
     test(`${visit.name} is free of what axe finds, and fits 320 pixels`, async ({ open }) => {
       const { path, guardian } = await registrationFor(visit.until);
