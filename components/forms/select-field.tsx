@@ -2,7 +2,7 @@
 
 import type { ReactNode } from "react";
 import type { Choice } from "./choice";
-import { FieldError, Hint } from "./field-parts";
+import { FieldFrame } from "./field-frame";
 import { useField } from "./form-context";
 
 type Props = { name: string; label: string; hint?: ReactNode; choices: readonly Choice[]; value?: string; empty?: string; isInline?: boolean };
@@ -11,12 +11,7 @@ export function SelectField({ name, label, hint, choices, value = "", empty, isI
   const field = useField(name);
   const chosen = field.typed(value);
   return (
-    <div className={isInline ? "flex flex-wrap items-center gap-x-4 gap-y-1" : "my-5"}>
-      <label htmlFor={field.id} className="block font-bold mb-0.5">
-        {label}
-      </label>
-      {hint && <Hint id={field.id}>{hint}</Hint>}
-      <FieldError id={field.id} message={field.error} />
+    <FieldFrame field={field} label={label} hint={hint} isInline={isInline}>
       <select
         id={field.id}
         name={name}
@@ -34,6 +29,6 @@ export function SelectField({ name, label, hint, choices, value = "", empty, isI
           </option>
         ))}
       </select>
-    </div>
+    </FieldFrame>
   );
 }

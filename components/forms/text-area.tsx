@@ -1,7 +1,7 @@
 "use client";
 
 import type { ReactNode } from "react";
-import { FieldError, Hint } from "./field-parts";
+import { FieldFrame } from "./field-frame";
 import { useField } from "./form-context";
 
 type Props = { name: string; label: string; hint?: ReactNode; value?: string; rows?: number };
@@ -9,12 +9,7 @@ type Props = { name: string; label: string; hint?: ReactNode; value?: string; ro
 export function TextArea({ name, label, hint, value = "", rows = 4 }: Props) {
   const field = useField(name);
   return (
-    <div className="my-5">
-      <label htmlFor={field.id} className="block font-bold mb-0.5">
-        {label}
-      </label>
-      {hint && <Hint id={field.id}>{hint}</Hint>}
-      <FieldError id={field.id} message={field.error} />
+    <FieldFrame field={field} label={label} hint={hint}>
       <textarea
         id={field.id}
         name={name}
@@ -25,6 +20,6 @@ export function TextArea({ name, label, hint, value = "", rows = 4 }: Props) {
         className="field-box max-w-[44rem]"
         {...field.watched}
       />
-    </div>
+    </FieldFrame>
   );
 }

@@ -1,7 +1,7 @@
 "use client";
 
 import type { ReactNode } from "react";
-import { FieldError, Hint } from "./field-parts";
+import { FieldFrame } from "./field-frame";
 import { useField } from "./form-context";
 
 type Props = {
@@ -19,12 +19,7 @@ type Props = {
 export function TextField({ name, label, hint, type = "text", autoComplete, inputMode, value = "", isShort = false, spellCheck }: Props) {
   const field = useField(name);
   return (
-    <div className="my-5">
-      <label htmlFor={field.id} className="block font-bold mb-0.5">
-        {label}
-      </label>
-      {hint && <Hint id={field.id}>{hint}</Hint>}
-      <FieldError id={field.id} message={field.error} />
+    <FieldFrame field={field} label={label} hint={hint}>
       <input
         id={field.id}
         name={name}
@@ -38,6 +33,6 @@ export function TextField({ name, label, hint, type = "text", autoComplete, inpu
         className={`field-box ${isShort ? "short" : ""}`}
         {...field.watched}
       />
-    </div>
+    </FieldFrame>
   );
 }

@@ -1,3 +1,4 @@
+import { z } from "zod";
 import { findPerson } from "@/lib/people/person-store";
 import { findProfile } from "@/lib/families/participant-store";
 import { slugSchema } from "@/lib/outings/outing-schema";
@@ -15,7 +16,7 @@ import { findRosterOuting } from "./roster-access";
  * after. Legal names, vehicles and reading stay with staff. Every reading is noted, so it is a command.
  */
 export const openContacts = defineCommand({
-  input: slugSchema,
+  input: slugSchema.extend({ at: z.enum(["desk", "field"]).default("field") }),
   load: (conn, actor, { slug }, now) => {
     const scope = findRosterOuting(conn, actor, slug, now);
     if (!scope) return null;
@@ -26,7 +27,8 @@ export const openContacts = defineCommand({
     }));
     return { ...scope, people };
   },
-  allow: (actor, { access }) => maySeeRoster(actor, access, access.now),
+  // The desk is for staff, also where a leader could read the same on their own page.
+  allow: (actor, { access }, { at }) => (at === "field" || isStaff(actor)) && maySeeRoster(actor, access, access.now),
   run: ({ conn, now, actor, found: { outing, people } }) => {
     if (!isSignedIn(actor)) return forbidden();
     noteReading(conn, now, { personId: actor.personId, what: "opened contacts and pick-up list", aboutId: outing.id });

@@ -41,6 +41,10 @@ test("black on white is 21 to 1, as WCAG says", () => {
   expect(contrast("#000000", "#ffffff")).toBeCloseTo(21, 5);
 });
 
+test("dark by choice is the dark of the device", () => {
+  expect(themes.dark).toEqual(themes["dark by the device"]);
+});
+
 describe.each(Object.entries(themes))("in the theme %s", (name, tokens) => {
   test("every token is there", () => {
     expect(Object.keys(tokens).sort()).toEqual(Object.keys(themes.light).sort());

@@ -12,7 +12,7 @@ type Props = { params: Promise<{ slug: string }> };
 
 export default async function DeskContactsPage({ params }: Props) {
   const { slug } = await params;
-  const { outing, people } = await ask(openContacts, { slug });
+  const { outing, people } = await ask(openContacts, { slug, at: "desk" });
   return (
     <>
       <PageHeading title="Contacts and pick-up" crumbs={[{ href: "/desk", text: "Desk" }, { href: pathTo.deskOuting(slug), text: outing.title }]} facts="Each opening of this page is noted. It is not for paper." />
