@@ -19,6 +19,8 @@ export default defineConfig({
     },
     // Each test has a database of its own, so files share a process and its loaded packages: a third less work.
     isolate: false,
+    // Unsaid, one core is left idle for whoever is typing; here both work.
+    maxWorkers: 2,
     testTimeout: 20_000,
   },
 });

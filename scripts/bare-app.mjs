@@ -13,6 +13,8 @@ import { inRoot } from "./root.mjs";
 const FILES = {
   "package.json": JSON.stringify({ name: "bare", private: true, type: "module" }),
   "next.config.mjs": `const config = { turbopack: { root: ${JSON.stringify(inRoot())} } };\nexport default config;\n`,
+  // Of its own, or the framework takes the checkout's above it.
+  "instrumentation.js": "export function register() {}\n",
   "app/layout.jsx": `export default function Layout({ children }) {
   return <html lang="en"><body>{children}</body></html>;
 }

@@ -119,4 +119,6 @@ function row([first = "", ...others]) {
 }
 
 /** @param {number} bytes */
-const kilobytes = (bytes) => `${(bytes / 1024).toFixed(1)} KB`;
+function kilobytes(bytes) {
+  return `${(bytes / 1024).toFixed(1)} KB`;
+}

@@ -6,17 +6,45 @@ import { format, isValid, parse } from "date-fns";
  * what people read is always in a place's own time zone (IANA name).
  */
 
+type WallClock = { weekday: string; year: string; month: string; monthName: string; day: string; hour: number; minute: string };
+
+const clocks = new Map<string, { numbers: Intl.DateTimeFormat; names: Intl.DateTimeFormat }>();
+
+/** What a clock and a calendar on the wall of a zone show. One formatter a zone is kept: making one takes longest. */
+function wallClock(instant: string, zone: string): WallClock {
+  let clock = clocks.get(zone);
+  if (!clock) {
+    const digits = { year: "numeric", month: "2-digit", day: "2-digit", hour: "2-digit", minute: "2-digit" } as const;
+    clock = {
+      numbers: new Intl.DateTimeFormat("en-US", { timeZone: zone, hourCycle: "h23", ...digits }),
+      names: new Intl.DateTimeFormat("en-US", { timeZone: zone, weekday: "long", month: "long" }),
+    };
+    clocks.set(zone, clock);
+  }
+  const at = new Date(instant);
+  const shown: Partial<Record<Intl.DateTimeFormatPartTypes, string>> = {};
+  for (const { type, value } of clock.numbers.formatToParts(at)) shown[type] = value;
+  const named: Partial<Record<Intl.DateTimeFormatPartTypes, string>> = {};
+  for (const { type, value } of clock.names.formatToParts(at)) named[type] = value;
+  const { year = "", month = "", day = "", hour = "", minute = "" } = shown;
+  const { weekday = "", month: monthName = "" } = named;
+  return { weekday, year: year.padStart(4, "0"), month, monthName, day, hour: Number(hour), minute };
+}
+
 export function dayOf(instant: string, zone: string): string {
-  return format(new TZDate(instant, zone), "yyyy-MM-dd");
+  const { year, month, day } = wallClock(instant, zone);
+  return `${year}-${month}-${day}`;
 }
 
 export function timeOf(instant: string, zone: string): string {
-  return format(new TZDate(instant, zone), "HH:mm");
+  const { hour, minute } = wallClock(instant, zone);
+  return `${String(hour).padStart(2, "0")}:${minute}`;
 }
 
 /** "Saturday 9 January 2027" */
 export function dayInWords(instant: string, zone: string): string {
-  return format(new TZDate(instant, zone), "EEEE d MMMM yyyy");
+  const { weekday, day, monthName, year } = wallClock(instant, zone);
+  return `${weekday} ${Number(day)} ${monthName} ${year}`;
 }
 
 /** "9 January 2027" for a day without a time. */
@@ -26,12 +54,11 @@ export function plainDayInWords(day: string): string {
 
 /** "9:00 a.m.", "noon", "12:30 p.m." */
 export function timeInWords(instant: string, zone: string): string {
-  const at = new TZDate(instant, zone);
-  const clock = format(at, "H:mm");
-  if (clock === "12:00") return "noon";
-  if (clock === "0:00") return "midnight";
-  const half = at.getHours() < 12 ? "a.m." : "p.m.";
-  return `${format(at, at.getMinutes() === 0 ? "h" : "h:mm")} ${half}`;
+  const { hour, minute } = wallClock(instant, zone);
+  if (minute === "00" && hour === 12) return "noon";
+  if (minute === "00" && hour === 0) return "midnight";
+  const onTwelve = hour % 12 === 0 ? 12 : hour % 12;
+  return `${onTwelve}${minute === "00" ? "" : `:${minute}`} ${hour < 12 ? "a.m." : "p.m."}`;
 }
 
 /** "9 a.m. to noon" */
@@ -46,7 +73,7 @@ export function momentInWords(instant: string, zone: string): string {
 
 /** "2027-01" for grouping, and "January 2027" for the heading. */
 export function monthOf(instant: string, zone: string): string {
-  return format(new TZDate(instant, zone), "yyyy-MM");
+  return dayOf(instant, zone).slice(0, 7);
 }
 
 export function monthInWords(month: string): string {

@@ -7,21 +7,35 @@ import { modelPrintable } from "./models/stl";
 import { modelAudio } from "./models/wav";
 import type { Story } from "./story";
 
-/** The five models with their files made anew, and their ids by slug. */
+type MadeFiles = { picture: Uint8Array; audio: Uint8Array; printable: Uint8Array };
+
+const made = new Map<string, MadeFiles>();
+
+/** A model's files. They are the same each time and take half a second, so a process makes them once. */
+async function filesOf(model: DemoModel): Promise<MadeFiles> {
+  const before = made.get(model.slug);
+  if (before) return before;
+  const files = { picture: await modelPicture(model), audio: modelAudio(model), printable: modelPrintable(model) };
+  made.set(model.slug, files);
+  return files;
+}
+
+/** The five models with their files, and their ids by slug. */
 export async function seedModels(story: Story, filesDir: string): Promise<ReadonlyMap<string, string>> {
   const ids = new Map<string, string>();
   const at = story.daysAgo(115, "14:00");
   for (const [position, model] of demoModels.entries()) {
     const keep = (bytes: Uint8Array, mediaType: string) => storeFile(story.conn, at, filesDir, { bytes, mediaType });
     const { slug, title, concept } = model;
+    const { picture, audio, printable } = await filesOf(model);
     const id = insertModel(story.conn, {
       slug,
       title,
       concept,
       facts: factsOf(model),
-      pictureSha256: keep(await modelPicture(model), "image/png"),
-      audioSha256: keep(modelAudio(model), "audio/wav"),
-      printableSha256: keep(modelPrintable(model), "model/stl"),
+      pictureSha256: keep(picture, "image/png"),
+      audioSha256: keep(audio, "audio/wav"),
+      printableSha256: keep(printable, "model/stl"),
       position,
     });
     ids.set(slug, id);
