@@ -1,10 +1,9 @@
 "use client";
 
-import { createContext, useContext, type ChangeEventHandler, type FocusEventHandler, type Ref } from "react";
+import { createContext, useContext, type ChangeEventHandler, type FocusEventHandler } from "react";
 import type { FormValues } from "@/lib/web/form-state";
 
 type Watcher = {
-  ref: Ref<HTMLInputElement & HTMLSelectElement & HTMLTextAreaElement>;
   onChange: ChangeEventHandler;
   onBlur: FocusEventHandler;
 };

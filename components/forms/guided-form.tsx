@@ -1,7 +1,7 @@
 "use client";
 
 import { startTransition, useActionState, useId, useMemo, useState, type FormEvent, type ReactNode } from "react";
-import { get, set, useForm, type FieldErrors, type FieldValues } from "react-hook-form";
+import { get, set, useForm, type FieldErrors, type FieldValues, type UseFormRegisterReturn } from "react-hook-form";
 import type { z } from "zod";
 import { fieldMessages } from "@/lib/shared/field-messages";
 import { readForm } from "@/lib/web/read-form";
@@ -49,7 +49,7 @@ export function GuidedForm({ action, schema, submit, carry = {}, children }: Pro
   }
 
   return (
-    <FormFactsProvider value={{ scope: "", values: refused?.values ?? null, errors, watch: (name) => register(name) }}>
+    <FormFactsProvider value={{ scope: "", values: refused?.values ?? null, errors, watch: (name) => watcherOf(register(name)) }}>
       {isLocal && Object.keys(local).length > 0 && <ErrorSummary sentence="There is a problem" fields={local} attempt={localAttempt} />}
       {!isLocal && refused && <ErrorSummary sentence={refused.sentence} fields={refused.fields} attempt={1000 + refused.attempt} />}
       <DoneMessage sentence={state.status === "done" ? state.sentence : ""} />
@@ -60,6 +60,14 @@ export function GuidedForm({ action, schema, submit, carry = {}, children }: Pro
       </form>
     </FormFactsProvider>
   );
+}
+
+/**
+ * Only the handlers, never the ref: given a field's element, React Hook Form writes its own idea of the value into
+ * it, and a group of tick boxes with one ticked came out with all of them ticked.
+ */
+function watcherOf({ onChange, onBlur }: UseFormRegisterReturn) {
+  return { onChange, onBlur };
 }
 
 /** Reads the form element rather than the watched values: unticked boxes and hidden fields count as the server counts them. */

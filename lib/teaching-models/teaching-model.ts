@@ -41,4 +41,3 @@ export type TeachingModel = {
 export type StoredFile = { sha256: string; bytes: number; mediaType: string };
 
 export const modelFiles = ["picture", "audio", "printable"] as const;
-export type ModelFile = (typeof modelFiles)[number];
