@@ -1,6 +1,6 @@
 "use client";
 
-import { startTransition, useActionState, useId, useMemo, useState, type FormEvent, type ReactNode } from "react";
+import { startTransition, useActionState, useId, useMemo, useState, type ChangeEvent, type FormEvent, type ReactNode } from "react";
 import { get, set, useForm, type FieldErrors, type FieldValues, type UseFormRegisterReturn } from "react-hook-form";
 import type { z } from "zod";
 import { fieldMessages } from "@/lib/shared/field-messages";
@@ -21,8 +21,9 @@ type Props = {
 };
 
 /**
- * An action form that also helps while typing. React Hook Form watches the fields; what it checks is the
- * form as the server will read it, with the same schema, so the two cannot disagree.
+ * An action form that also helps while typing: not before it is sent, since a sentence that appears when a field
+ * is left moves the page under the pointer, but from then on with every change. React Hook Form watches the fields;
+ * what it checks is the form as the server will read it, with the same schema, so the two cannot disagree.
  */
 export function GuidedForm({ action, schema, submit, carry = {}, children }: Props) {
   const [state, dispatch, pending] = useActionState(action, freshForm);
@@ -30,12 +31,17 @@ export function GuidedForm({ action, schema, submit, carry = {}, children }: Pro
   const [answered, setAnswered] = useState(0);
   const formId = useId();
   const resolver = useMemo(() => resolverFor(schema, formId), [schema, formId]);
-  const { register, trigger, formState } = useForm<FieldValues>({ mode: "onTouched", reValidateMode: "onChange", resolver });
+  const { register, trigger, formState } = useForm<FieldValues>({ mode: "onSubmit", resolver });
 
   const refused = state.status === "refused" ? state : null;
   const local = flatErrors(formState.errors);
   const isLocal = localAttempt > answered;
   const errors = { ...(isLocal ? {} : refused?.fields), ...local };
+
+  // Once something was wrong, each change is checked at once, so that what is mended stops being named.
+  const afterwards = () => {
+    if (localAttempt > 0) void trigger();
+  };
 
   async function submitForm(event: FormEvent<HTMLFormElement>) {
     event.preventDefault();
@@ -49,7 +55,7 @@ export function GuidedForm({ action, schema, submit, carry = {}, children }: Pro
   }
 
   return (
-    <FormFactsProvider value={{ scope: "", values: refused?.values ?? null, errors, watch: (name) => watcherOf(register(name)) }}>
+    <FormFactsProvider value={{ scope: "", values: refused?.values ?? null, errors, watch: (name) => watcherOf(register(name), afterwards) }}>
       {isLocal && Object.keys(local).length > 0 && <ErrorSummary sentence="There is a problem" fields={local} attempt={localAttempt} />}
       {!isLocal && refused && <ErrorSummary sentence={refused.sentence} fields={refused.fields} attempt={1000 + refused.attempt} />}
       <DoneMessage sentence={state.status === "done" ? state.sentence : ""} />
@@ -66,8 +72,11 @@ export function GuidedForm({ action, schema, submit, carry = {}, children }: Pro
  * Only the handlers, never the ref: given a field's element, React Hook Form writes its own idea of the value into
  * it, and a group of tick boxes with one ticked came out with all of them ticked.
  */
-function watcherOf({ onChange, onBlur }: UseFormRegisterReturn) {
-  return { onChange, onBlur };
+function watcherOf({ onChange, onBlur }: UseFormRegisterReturn, afterwards: () => void) {
+  return {
+    onChange: (event: ChangeEvent) => void onChange(event).then(afterwards),
+    onBlur,
+  };
 }
 
 /** Reads the form element rather than the watched values: unticked boxes and hidden fields count as the server counts them. */

@@ -2,6 +2,7 @@ import { outingView, type OutingView } from "@/lib/outings/outing-view";
 import type { AccessProfile } from "@/lib/families/access-profile";
 import { momentInWords } from "@/lib/shared/dates";
 import { moneyInWords } from "@/lib/shared/money";
+import { sentence } from "@/lib/shared/words";
 import { isLive, stepsLeft, type GuardianPlan, type RegistrationState, type Step } from "./registration";
 import type { Registration } from "./registration-store";
 
@@ -63,7 +64,7 @@ function stateInWords(registration: Registration, holdUntil: string | null, now:
     case "confirmed":
       return `${name} is coming. Count-off number ${registration.seatNumber ?? "to follow"}.`;
     case "held":
-      return `A seat is held for ${name} until ${holdUntil ?? "later today"}.`;
+      return sentence(`A seat is held for ${name} until ${holdUntil ?? "later today"}`);
     case "waiting":
       return `${name} is number ${registration.placeInQueue ?? 1} on the waiting list. We write to you as soon as a seat is free.`;
     case "turned away":

@@ -5,6 +5,7 @@ import { PageHeading } from "@/components/ui/page-heading";
 import { Verdict } from "@/components/ui/verdict";
 import { listChildren } from "@/lib/families/list-children";
 import { listMyRegistrations } from "@/lib/registrations/list-my-registrations";
+import { sentence } from "@/lib/shared/words";
 import { ask } from "@/lib/web/ask";
 import { pathTo } from "@/lib/web/paths";
 
@@ -28,7 +29,7 @@ export default async function FamilyPage() {
                 <Link href={pathTo.registration(one.id)} className="font-bold">
                   Finish {one.child.nameUsed}, {one.outing.title}
                 </Link>
-                . The seat is held until {one.holdUntil}.
+                . {sentence(`The seat is held until ${one.holdUntil ?? "later today"}`)}
               </li>
             ))}
           </ul>

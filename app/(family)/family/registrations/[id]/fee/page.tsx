@@ -6,6 +6,7 @@ import { TextField } from "@/components/forms/text-field";
 import { PageHeading } from "@/components/ui/page-heading";
 import { Verdict } from "@/components/ui/verdict";
 import { showRegistration } from "@/lib/registrations/show-registration";
+import { sentence } from "@/lib/shared/words";
 import { ask } from "@/lib/web/ask";
 import { pathTo } from "@/lib/web/paths";
 import { chooseFeeAction } from "../actions";
@@ -36,7 +37,7 @@ export default async function FeePage({ params }: Props) {
       ) : (
         <>
           <p className="mt-4">
-            The seat is held until {holdUntil}. Card payment happens on the payment service&rsquo;s own page; we never see the card. A no-fee place
+            {sentence(`The seat is held until ${holdUntil ?? "later today"}`)} Card payment happens on the payment service&rsquo;s own page; we never see the card. A no-fee place
             is a seat like any other: no reason is asked, and nobody but the coordinator can tell.
           </p>
           <ActionForm action={chooseFeeAction} submit="Go on" carry={{ registrationId: id }}>
